@@ -1,0 +1,128 @@
+export interface ProblemType {
+  status: number;
+  title: string;
+  /** What happened and what it means. */
+  meaning: string;
+  /** What the caller can do about it. */
+  remedy: string;
+}
+
+/** Every problem the API can answer with. The key is the last part of its `type` URL, `/docs/problems/<slug>`. */
+export const PROBLEMS = {
+  "malformed-json": {
+    status: 400,
+    title: "The body is not JSON",
+    meaning: "The body could not be parsed as JSON, so nothing in it was looked at. NaN, Infinity, comments and trailing commas are not JSON.",
+    remedy: "Send UTF-8 JSON as RFC 8259 has it. The detail names where parsing stopped.",
+  },
+  "missing-key": {
+    status: 401,
+    title: "No API key was sent",
+    meaning: "The operation needs an API key and the request has none.",
+    remedy: "Send the header Authorization: Bearer <key>. Keys are made in the portal under Keys.",
+  },
+  "malformed-key": {
+    status: 401,
+    title: "This is not a key as issued",
+    meaning: "The key's form or its checksum is wrong: a character was lost, added or changed while it was copied.",
+    remedy: "Copy the whole key again. A key begins with averduct_sandbox_ or averduct_production_.",
+  },
+  "unknown-key": {
+    status: 401,
+    title: "This key does not exist",
+    meaning: "The key has the right form but no such key is on record, or its secret does not match.",
+    remedy: "Check that the key belongs to this installation, or make a new one in the portal.",
+  },
+  "revoked-key": {
+    status: 401,
+    title: "This key was revoked",
+    meaning: "The key was valid once and somebody revoked it. It will not work again.",
+    remedy: "Use the key that replaced it, or make a new one in the portal.",
+  },
+  "expired-key": {
+    status: 401,
+    title: "This key has expired",
+    meaning: "The key's expiry, or the overlap after its rotation, has passed.",
+    remedy: "Use its successor, or make a new key in the portal.",
+  },
+  "insufficient-scope": {
+    status: 403,
+    title: "The key lacks the scope for this operation",
+    meaning: "The key is valid but was not given the scope that this operation needs.",
+    remedy: "Use a key with the scope named in the detail.",
+  },
+  "network-not-allowed": {
+    status: 403,
+    title: "The key may not be used from this network",
+    meaning: "The key is restricted to a list of networks and the request came from outside them.",
+    remedy: "Call from an allowed network, or change the key's list in the portal.",
+  },
+  "account-suspended": {
+    status: 403,
+    title: "The organisation is suspended",
+    meaning: "An administrator suspended the organisation that owns this key.",
+    remedy: "An owner of the organisation finds the reason in the portal.",
+  },
+  "not-found": {
+    status: 404,
+    title: "Nothing here",
+    meaning: "There is no such path or record, or it belongs to another organisation or the other environment.",
+    remedy: "Check the path and the id, and that the key is of the environment the record was made in.",
+  },
+  "method-not-allowed": {
+    status: 405,
+    title: "This path does not take this method",
+    meaning: "The path exists but not with this HTTP method.",
+    remedy: "Use a method listed in the Allow header.",
+  },
+  "body-too-large": {
+    status: 413,
+    title: "The body is too large",
+    meaning: "The body is over the limit of this operation, 1 MiB unless the reference says otherwise.",
+    remedy: "Send fewer traverses at once, or use the batch operation.",
+  },
+  "unsupported-media-type": {
+    status: 415,
+    title: "The body's content type is not taken here",
+    meaning: "The operation takes another content type than the one sent.",
+    remedy: "Send Content-Type: application/json.",
+  },
+  "invalid-request": {
+    status: 422,
+    title: "The request does not fit the operation",
+    meaning: "The body is JSON, but fields are missing, unknown, of the wrong type, in a unit that does not belong, or out of bounds. Each is listed in errors.",
+    remedy: "Mend every field listed in errors; each pointer is a JSON Pointer (RFC 6901) into the body.",
+  },
+  "impossible-input": {
+    status: 422,
+    title: "The input is not physically possible",
+    meaning: "Every field is well-formed, but together they describe something that cannot be, or that lies outside the range in which the equations hold.",
+    remedy: "Check the fields listed in errors against the site notes.",
+  },
+  "burst-limit-reached": {
+    status: 429,
+    title: "Too many requests in this second",
+    meaning: "The organisation sent more requests a second than its plan allows.",
+    remedy: "Wait for the time in Retry-After, then go on. Send many traverses in one batch.",
+  },
+  "quota-reached": {
+    status: 429,
+    title: "The month's quota is used up",
+    meaning: "The organisation has used the requests its plan includes this calendar month (UTC).",
+    remedy: "Wait for the new month, or ask for a larger plan.",
+  },
+  "internal-error": {
+    status: 500,
+    title: "A fault on our side",
+    meaning: "Something went wrong that the request did not cause. It is in our log under the request id.",
+    remedy: "Try again once; if it persists, report the request id.",
+  },
+  "temporarily-unavailable": {
+    status: 503,
+    title: "Not available at this moment",
+    meaning: "A part the operation needs, most likely the database, does not answer. Nothing was stored.",
+    remedy: "Repeat the request after the time in Retry-After.",
+  },
+} as const satisfies Record<string, ProblemType>;
+
+export type ProblemSlug = keyof typeof PROBLEMS;
