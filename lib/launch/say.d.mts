@@ -1,0 +1,3 @@
+export function say(line: string): void;
+export class CannotStart extends Error {}
+export function runCommand(work: () => Promise<void>): Promise<void>;

@@ -1,0 +1,11 @@
+// The one start command. Only what Node.js itself brings may be imported before the packages are there.
+import { ensurePackages } from "./packages.mjs";
+import { runCommand } from "./say.mjs";
+
+await runCommand(async () => {
+  ensurePackages();
+  const { register } = await import("tsx/esm/api");
+  register();
+  const { start } = await import("./start.ts");
+  await start({ development: process.argv.includes("--dev") });
+});

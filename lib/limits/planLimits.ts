@@ -1,0 +1,65 @@
+import { Problem } from "@/lib/problems/problem";
+import type { Key } from "@/lib/keys/keyDirectory";
+import { processWide } from "@/lib/runtime/processWide";
+import { onShutdown } from "@/lib/runtime/shutdown";
+import { BlockLimiter, type Allowance, type Window } from "./blockLimiter";
+import { SharedCounter } from "./sharedCounter";
+
+const SECOND_MS = 1_000;
+const DAY_SECONDS = 86_400;
+
+const secondAt = (now: number): Window => {
+  const start = Math.floor(now / SECOND_MS);
+  return { id: String(start), endsAt: (start + 1) * SECOND_MS };
+};
+
+const monthAt = (now: number): Window => {
+  const date = new Date(now);
+  return { id: date.toISOString().slice(0, 7), endsAt: Date.UTC(date.getUTCFullYear(), date.getUTCMonth() + 1, 1) };
+};
+
+const limiters = () =>
+  processWide("planLimiters", () => {
+    const burst = new BlockLimiter("burst", new SharedCounter(5), secondAt);
+    const quota = new BlockLimiter("quota", new SharedCounter(40 * DAY_SECONDS), monthAt);
+    onShutdown("quota", () => quota.giveBack());
+    return { burst, quota };
+  });
+
+export interface PlanAllowances {
+  burst: Allowance;
+  quota: Allowance | null;
+}
+
+/** Spends one request of a second's and of the month's allowance. Throws the problem when either is used up. */
+export async function spendRequest(key: Key, now: number): Promise<PlanAllowances> {
+  const { burst, quota } = limiters();
+  const subject = `${key.organisationId}:${key.environment}`;
+  const second = await burst.spend(subject, key.requestsPerSecond, 1, now);
+  if (!second.allowed) throw overLimit("burst-limit-reached", `The plan allows ${second.limit} requests a second.`, { burst: second, quota: null }, now);
+  const month = await quota.spend(subject, key.monthlyRequests, 1, now);
+  if (!month.allowed) throw overLimit("quota-reached", `The plan's ${month.limit} requests of this month are used up.`, { burst: second, quota: month }, now);
+  return { burst: second, quota: month };
+}
+
+function overLimit(slug: "burst-limit-reached" | "quota-reached", detail: string, allowances: PlanAllowances, now: number): Problem {
+  const { endsAt } = slug === "quota-reached" ? allowances.quota! : allowances.burst;
+  return new Problem(slug, {
+    detail,
+    errors: [{ pointer: "", code: slug.replaceAll("-", "_"), detail }],
+    headers: { "Retry-After": String(secondsUntil(endsAt, now)), ...limitHeaders(allowances, now) },
+  });
+}
+
+const secondsUntil = (moment: number, now: number): number => Math.max(1, Math.ceil((moment - now) / SECOND_MS));
+
+/** `RateLimit` and `RateLimit-Policy` as draft-ietf-httpapi-ratelimit-headers has them. */
+export function limitHeaders({ burst, quota }: PlanAllowances, now: number): Record<string, string> {
+  const policies = [`"burst";q=${burst.limit};w=1`];
+  const states = [`"burst";r=${burst.remaining};t=${secondsUntil(burst.endsAt, now)}`];
+  if (quota) {
+    policies.push(`"month";q=${quota.limit};w=${31 * DAY_SECONDS}`);
+    states.push(`"month";r=${quota.remaining};t=${secondsUntil(quota.endsAt, now)}`);
+  }
+  return { "RateLimit-Policy": policies.join(", "), RateLimit: states.join(", ") };
+}

@@ -1,0 +1,52 @@
+import { RateLimiterMemory, RateLimiterMySQL, RateLimiterRes, type RateLimiterAbstract } from "rate-limiter-flexible";
+import { database } from "@/db/connection";
+import { log } from "@/lib/runtime/log";
+
+/** A shared answer that takes longer is not waited for: this instance then counts by itself. */
+const PATIENCE_MS = 250;
+/** The limiters only count; what a plan allows is decided from the count, so they never refuse by themselves. */
+const NO_LIMIT = 2 ** 31 - 1;
+
+/** Counts points under a key over all instances, and by itself while the shared store is away. */
+export class SharedCounter {
+  private readonly shared: RateLimiterAbstract;
+  private readonly alone: RateLimiterAbstract;
+
+  /** @param keepSeconds How long a key's count is kept after its first point. */
+  constructor(keepSeconds: number) {
+    this.alone = new RateLimiterMemory({ points: NO_LIMIT, duration: keepSeconds });
+    this.shared = new RateLimiterMySQL({
+      storeClient: database(),
+      storeType: "knex",
+      dbName: String(database().client.config.connection.database),
+      tableName: "rate_limits",
+      tableCreated: true,
+      points: NO_LIMIT,
+      duration: keepSeconds,
+    });
+  }
+
+  /** Adds points and returns what the count was before. */
+  async add(key: string, points: number): Promise<number> {
+    try {
+      return (await withinPatience(this.shared.consume(key, points))).consumedPoints - points;
+    } catch (error) {
+      if (error instanceof RateLimiterRes) return error.consumedPoints - points;
+      log().warn({ err: error }, "the shared limiter does not answer; this instance counts alone");
+      return (await this.alone.consume(key, points)).consumedPoints - points;
+    }
+  }
+
+  /** Gives points back that were taken but not spent. */
+  async giveBack(key: string, points: number): Promise<void> {
+    await this.shared.reward(key, points);
+  }
+}
+
+async function withinPatience<T>(answer: Promise<T>): Promise<T> {
+  let timer: NodeJS.Timeout | undefined;
+  const timeout = new Promise<never>((_, reject) => {
+    timer = setTimeout(() => reject(new Error(`no answer within ${PATIENCE_MS} ms`)), PATIENCE_MS);
+  });
+  return Promise.race([answer, timeout]).finally(() => clearTimeout(timer));
+}
