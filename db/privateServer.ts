@@ -23,8 +23,9 @@ export interface PrivateServer {
 /**
  * Runs MariaDB on loopback with a data folder, port, socket and password of its own.
  * A server left behind by a killed parent is stopped first, so that its data is recovered and not shared.
+ * @param fixedPort Port to listen on; a free one when left out.
  */
-export async function startPrivateServer(folder: string): Promise<PrivateServer> {
+export async function startPrivateServer(folder: string, fixedPort?: number): Promise<PrivateServer> {
   mkdirSync(folder, { recursive: true, mode: 0o700 });
   const files = {
     data: path.join(folder, "data"),
@@ -33,12 +34,12 @@ export async function startPrivateServer(folder: string): Promise<PrivateServer>
     password: path.join(folder, "password"),
     init: path.join(folder, "init.sql"),
   };
-  await stopLeftover(files.pid, files.data);
+  await stopLeftover(folder);
   createDataFolder(files.data);
 
   const password = secretIn(files.password);
   writeFileSync(files.init, accountSql(password), { mode: 0o600 });
-  const port = await freePort();
+  const port = fixedPort ?? (await freePort());
   const child = spawn(
     "/usr/sbin/mariadbd",
     [
@@ -124,12 +125,13 @@ async function untilReady(url: string, child: ChildProcess, logFile: string): Pr
   throw new Error(`MariaDB did not start. The end of ${logFile}:\n${lastLines}`);
 }
 
-/** Stops a server that a killed parent left running on this data folder. */
-async function stopLeftover(pidFile: string, data: string): Promise<void> {
+/** Stops a server that a killed parent left running in this folder. */
+export async function stopLeftover(folder: string): Promise<void> {
+  const pidFile = path.join(folder, "mariadbd.pid");
   if (!existsSync(pidFile)) return;
   const pid = Number(readFileSync(pidFile, "utf8"));
   // The pid may have gone to somebody else's process since.
-  if (commandLine(pid).includes(`--datadir=${data}`)) await stopProcess(pid, untilGone(pid));
+  if (commandLine(pid).includes(`--datadir=${path.join(folder, "data")}`)) await stopProcess(pid, untilGone(pid));
 }
 
 function commandLine(pid: number): string {

@@ -28,5 +28,5 @@ type KindOfAnswer<Answer extends AnswerKind> = Answer extends "absolutePressure"
 /** A quantity in the unit that answers in this system of units use. */
 export function inAnswerUnits<Answer extends AnswerKind>(answer: Answer, si: number, system: UnitSystem): QuantityOf<KindOfAnswer<Answer>> {
   const kind = (answer === "absolutePressure" ? "pressure" : answer) as KindOfAnswer<Answer>;
-  return fromSi(kind, si, ANSWER_UNITS[system][answer] as UnitOf<KindOfAnswer<Answer>>);
+  return fromSi(kind, si, ANSWER_UNITS[system][answer] as unknown as UnitOf<KindOfAnswer<Answer>>);
 }

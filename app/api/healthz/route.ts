@@ -1,0 +1,3 @@
+/** Whether the process answers at all. */
+export const GET = (): Response => Response.json({ status: "ok" }, { headers: { "Cache-Control": "no-store" } });
+export const dynamic = "force-dynamic";

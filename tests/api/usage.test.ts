@@ -1,0 +1,35 @@
+import { describe, expect, it } from "vitest";
+import { api, calculate, ROUND_TRAVERSE } from "../support/api";
+import { makeKey, testDatabase } from "../support/accounts";
+
+const flushed = (): Promise<void> => new Promise((resolve) => setTimeout(resolve, 1_000));
+
+describe("usage", () => {
+  it("counts every request by operation and status, the refused ones included", async () => {
+    const { id, text, organisationId } = await makeKey();
+    for (let call = 0; call < 3; call += 1) await calculate("airflow", text, ROUND_TRAVERSE).expect(200);
+    await calculate("airflow", text, {}).expect(422);
+    await flushed();
+    const rows = await testDatabase()("usage_minutes").where({ organisation_id: organisationId }).select("operation", "status").sum({ requests: "requests" }).groupBy("operation", "status").orderBy("status");
+    expect(rows.map((row) => [row.operation, row.status, Number(row.requests)])).toEqual([["airflow", 200, 3], ["airflow", 422, 1]]);
+    const key = await testDatabase()("api_keys").where({ id }).first();
+    expect(key.last_used_at).toBeInstanceOf(Date);
+    expect(["127.0.0.1", "::1"]).toContain(key.last_used_from);
+  });
+
+  it("counts a request of nobody", async () => {
+    const count = async (): Promise<number> => Number((await testDatabase()("usage_minutes").where({ organisation_id: "", operation: "airDensity", status: 401 }).sum({ sum: "requests" }).first())?.sum ?? 0);
+    const before = await count();
+    await api().post("/api/v1/calculations/air-density").send({}).expect(401);
+    await flushed();
+    expect(await count()).toBe(before + 1);
+  });
+
+  it("keeps recent requests with the problem they were answered with", async () => {
+    const { text, organisationId } = await makeKey();
+    const { headers } = await calculate("airflow", text, { duct: 1 }).expect(422);
+    await flushed();
+    const row = await testDatabase()("requests").where({ organisation_id: organisationId }).first();
+    expect(row).toMatchObject({ id: headers["request-id"], problem: "invalid-request", status: 422 });
+  });
+});
