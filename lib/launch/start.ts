@@ -12,6 +12,7 @@ import { ROOT } from "./packages.mjs";
 import { isPortFree } from "./portFree";
 import { CannotStart, say } from "./say.mjs";
 import { printWelcome } from "./welcome";
+import { DATABASE_FOLDER } from "./withDatabase";
 
 const DATA_FOLDER = path.join(ROOT, ".data");
 /** A part that ends by itself is started again, at most this often. */
@@ -33,7 +34,7 @@ export async function start({ development }: { development: boolean }): Promise<
   try {
     say("Bringing the database up to date …");
     await prepareDatabase(databaseUrl);
-    const demo = given.AVERDUCT_MODE === "production" ? null : await seedDemo(environment, path.join(DATA_FOLDER, "demo.json"));
+    const demo = given.AVERDUCT_MODE === "production" ? null : await seedDemo(databaseUrl, path.join(DATA_FOLDER, "demo.json"));
     if (!development) ensureBuild(".next", environment);
     await run.startApplication(environment);
     printWelcome(url, demo);
@@ -81,7 +82,7 @@ class Run {
   async startDatabase(): Promise<string> {
     ensureDebianProgram(MARIADB);
     say("Starting MariaDB …");
-    this.database = await startPrivateServer(path.join(DATA_FOLDER, "mariadb"));
+    this.database = await startPrivateServer(DATABASE_FOLDER);
     void this.keepDatabase(this.database);
     return this.database.url;
   }
@@ -108,7 +109,7 @@ class Run {
     if (this.stopping) return;
     say("MariaDB ended by itself; starting it again …");
     await pause(RESTART_PAUSE_MS);
-    this.database = await startPrivateServer(path.join(DATA_FOLDER, "mariadb"), Number(new URL(server.url).port));
+    this.database = await startPrivateServer(DATABASE_FOLDER, Number(new URL(server.url).port));
     return this.keepDatabase(this.database);
   }
 

@@ -1,0 +1,1 @@
+export default { compress: false, poweredByHeader: false };
