@@ -1,9 +1,7 @@
 import type { Knex } from "knex";
-import { fileURLToPath } from "node:url";
+import { migrationSource } from "@/db/migrations";
 
-const folder = (name: string): string => fileURLToPath(new URL(`./db/${name}`, import.meta.url));
-
-/** How Knex reaches MariaDB and where it finds migrations and seeds. */
+/** How Knex reaches MariaDB, and the migrations it runs. */
 export function knexConfig(databaseUrl: string, poolSize = 10): Knex.Config {
   const url = new URL(databaseUrl);
   return {
@@ -28,7 +26,7 @@ export function knexConfig(databaseUrl: string, poolSize = 10): Knex.Config {
       },
     },
     acquireConnectionTimeout: 2500,
-    migrations: { directory: folder("migrations"), loadExtensions: [".ts"], tableName: "migrations" },
+    migrations: { migrationSource, tableName: "migrations" },
   };
 }
 

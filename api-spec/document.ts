@@ -128,9 +128,8 @@ export function openApiDocument(): object {
     info: {
       title: "Averduct",
       version: "1.0.0",
-      summary: "Airflow calculations and stored duct traverse records.",
       description:
-        "Turns duct traverse readings into airflow figures with the working shown, and keeps each traverse as a record that anyone can check.\n\n" +
+        "Airflow calculations and stored duct traverse records. Turns duct traverse readings into airflow figures with the working shown, and keeps each traverse as a record that anyone can check.\n\n" +
         "Results support, and do not replace, local codes, the project specification and licensed or certified practice.",
       license: { name: "Proprietary", url: "https://averduct.example/terms" },
     },

@@ -21,7 +21,7 @@ const UNREACHABLE_URL = "mysql://averduct@127.0.0.1:1/averduct";
 
 /** Everything from a fresh clone to a served application; ends when it is told to stop. */
 export async function start({ development }: { development: boolean }): Promise<void> {
-  const given = { ...process.env, NODE_ENV: development ? "development" : "production" };
+  const given: NodeJS.ProcessEnv = { ...process.env, NODE_ENV: development ? "development" : "production" };
   const { HOST, PORT } = readConfig({ ...given, DATABASE_URL: given.DATABASE_URL ?? UNREACHABLE_URL });
   takeFolder();
   if (!(await isPortFree(HOST, PORT))) {
@@ -30,7 +30,13 @@ export async function start({ development }: { development: boolean }): Promise<
   const url = given.AVERDUCT_URL ?? `http://localhost:${PORT}`;
   const run = new Run();
   const databaseUrl = given.DATABASE_URL ?? (await run.startDatabase());
-  const environment: NodeJS.ProcessEnv = { ...given, NODE_ENV: given.NODE_ENV as "production", DATABASE_URL: databaseUrl, AVERDUCT_URL: url, LOG_LEVEL: given.LOG_LEVEL ?? "warn", AVERDUCT_DIST_DIR: development ? ".next-dev" : ".next" };
+  const environment: NodeJS.ProcessEnv = {
+    ...given,
+    DATABASE_URL: databaseUrl,
+    AVERDUCT_URL: url,
+    LOG_LEVEL: given.LOG_LEVEL ?? "warn",
+    AVERDUCT_DIST_DIR: development ? ".next-dev" : ".next",
+  };
   try {
     say("Bringing the database up to date …");
     await prepareDatabase(databaseUrl);
