@@ -10,7 +10,7 @@ describe("usage", () => {
     for (let call = 0; call < 3; call += 1) await calculate("airflow", text, ROUND_TRAVERSE).expect(200);
     await calculate("airflow", text, {}).expect(422);
     await flushed();
-    const rows: { operation: string; status: number; requests: string }[] = await testDatabase()("usage_minutes")
+    const rows = await testDatabase()<{ operation: string; status: number }>("usage_minutes")
       .where({ organisation_id: organisationId })
       .select("operation", "status")
       .sum({ requests: "requests" })
