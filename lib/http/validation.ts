@@ -44,9 +44,9 @@ function faultsOf(issue: Issue, root: unknown, prefix: PropertyKey[] = []): Prob
     case "invalid_value":
       return [valueAt(root, path) === undefined ? missing(path, `one of ${issue.values.map(String).join(", ")}`) : fault(path, "invalid_value", `Expected ${issue.values.length === 1 ? "" : "one of "}${issue.values.map((one) => JSON.stringify(one)).join(", ")}, got ${shown(valueAt(root, path))}.`)];
     case "too_small":
-      return [fault(path, "too_small", isCount(issue.origin) ? `Needs at least ${issue.minimum} ${countNoun(issue.origin)}.` : `Must be ${issue.inclusive === false ? "greater than" : "at least"} ${issue.minimum}.`)];
+      return [fault(path, "too_small", isCount(issue.origin) ? `Needs at least ${counted(issue.minimum, issue.origin)}.` : `Must be ${issue.inclusive === false ? "greater than" : "at least"} ${issue.minimum}.`)];
     case "too_big":
-      return [fault(path, "too_large", isCount(issue.origin) ? `Takes at most ${issue.maximum} ${countNoun(issue.origin)}.` : `Must be ${issue.inclusive === false ? "less than" : "at most"} ${issue.maximum}.`)];
+      return [fault(path, "too_large", isCount(issue.origin) ? `Takes at most ${counted(issue.maximum, issue.origin)}.` : `Must be ${issue.inclusive === false ? "less than" : "at most"} ${issue.maximum}.`)];
     case "custom":
       return [fault(path, typeof issue.params?.code === "string" ? issue.params.code : "invalid_value", issue.message)];
     default:
@@ -78,7 +78,10 @@ function missing(path: PropertyKey[], expected: string): ProblemFault {
 const article = (expected: string): string => (/^(one|the|an?) /.test(expected) ? expected : `${/^[aeiou]/.test(expected) ? "an" : "a"} ${expected === "record" ? "object" : expected}`);
 
 const isCount = (origin: string): boolean => ["array", "string", "set", "map"].includes(origin);
-const countNoun = (origin: string): string => (origin === "string" ? "characters" : "entries");
+function counted(count: number | bigint, origin: string): string {
+  const [one, many] = origin === "string" ? ["character", "characters"] : ["entry", "entries"];
+  return `${count} ${Number(count) === 1 ? one : many}`;
+}
 
 function kindOf(value: unknown): string {
   if (value === null) return "null";

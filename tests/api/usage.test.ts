@@ -10,13 +10,10 @@ describe("usage", () => {
     for (let call = 0; call < 3; call += 1) await calculate("airflow", text, ROUND_TRAVERSE).expect(200);
     await calculate("airflow", text, {}).expect(422);
     await flushed();
-    const rows = await testDatabase()<{ operation: string; status: number }>("usage_minutes")
-      .where({ organisation_id: organisationId })
-      .select("operation", "status")
-      .sum({ requests: "requests" })
-      .groupBy("operation", "status")
-      .orderBy("status");
-    expect(rows.map((row) => [row.operation, row.status, Number(row.requests)])).toEqual([["airflow", 200, 3], ["airflow", 422, 1]]);
+    const rows = await testDatabase()("usage_minutes").where({ organisation_id: organisationId }).orderBy("status");
+    const totals = new Map<string, number>();
+    for (const { operation, status, requests } of rows) totals.set(`${operation} ${status}`, (totals.get(`${operation} ${status}`) ?? 0) + requests);
+    expect([...totals]).toEqual([["airflow 200", 3], ["airflow 422", 1]]);
     const key = await testDatabase()("api_keys").where({ id }).first();
     expect(key.last_used_at).toBeInstanceOf(Date);
     expect(["127.0.0.1", "::1"]).toContain(key.last_used_from);
