@@ -27,7 +27,7 @@ const limiters = () =>
   });
 
 export interface PlanAllowances {
-  burst: Allowance;
+  burst: Allowance | null;
   quota: Allowance | null;
 }
 
@@ -42,8 +42,14 @@ export async function spendRequest(key: Key, now: number): Promise<PlanAllowance
   return { burst: second, quota: month };
 }
 
+/** Spends further calculations of the month's allowance: the items of a batch beyond its first. */
+export async function spendItems(key: Key, items: number, now: number): Promise<void> {
+  const month = await limiters().quota.spend(`${key.organisationId}:${key.environment}`, key.monthlyRequests, items, now);
+  if (!month.allowed) throw overLimit("quota-reached", `Of the plan's ${month.limit} requests a month, fewer than these ${items} are left.`, { burst: null, quota: month }, now);
+}
+
 function overLimit(slug: "burst-limit-reached" | "quota-reached", detail: string, allowances: PlanAllowances, now: number): Problem {
-  const { endsAt } = slug === "quota-reached" ? allowances.quota! : allowances.burst;
+  const { endsAt } = slug === "quota-reached" ? allowances.quota! : allowances.burst!;
   return new Problem(slug, {
     detail,
     errors: [{ pointer: "", code: slug.replaceAll("-", "_"), detail }],
@@ -55,11 +61,13 @@ const secondsUntil = (moment: number, now: number): number => Math.max(1, Math.c
 
 /** `RateLimit` and `RateLimit-Policy` as draft-ietf-httpapi-ratelimit-headers has them. */
 export function limitHeaders({ burst, quota }: PlanAllowances, now: number): Record<string, string> {
-  const policies = [`"burst";q=${burst.limit};w=1`];
-  const states = [`"burst";r=${burst.remaining};t=${secondsUntil(burst.endsAt, now)}`];
-  if (quota) {
-    policies.push(`"month";q=${quota.limit};w=${31 * DAY_SECONDS}`);
-    states.push(`"month";r=${quota.remaining};t=${secondsUntil(quota.endsAt, now)}`);
-  }
+  const policies: string[] = [];
+  const states: string[] = [];
+  const add = (name: string, seconds: number, { limit, remaining, endsAt }: Allowance): void => {
+    policies.push(`"${name}";q=${limit};w=${seconds}`);
+    states.push(`"${name}";r=${remaining};t=${secondsUntil(endsAt, now)}`);
+  };
+  if (burst) add("burst", 1, burst);
+  if (quota) add("month", 31 * DAY_SECONDS, quota);
   return { "RateLimit-Policy": policies.join(", "), RateLimit: states.join(", ") };
 }
