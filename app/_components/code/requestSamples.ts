@@ -6,8 +6,11 @@ export interface SampleRequest {
   url: string;
   /** JSON body. */
   body?: unknown;
-  /** Key to show; null where the request takes none. */
-  key: string | null;
+  /**
+   * A key's own text; left out, the sample reads it from the environment variable AVERDUCT_KEY. Null where the
+   * operation takes no key.
+   */
+  key?: string | null;
 }
 
 /** The same request as curl, TypeScript and Python, each complete: it runs when pasted. */
@@ -19,7 +22,7 @@ export const requestSamples = (request: SampleRequest): Sample[] => [
 
 function curl({ method, url, body, key }: SampleRequest): string {
   const lines = [`curl ${method === "GET" ? "" : `-X ${method} `}${url}`];
-  if (key !== null) lines.push(`-H "Authorization: Bearer ${key}"`);
+  if (key !== null) lines.push(`-H "Authorization: Bearer ${key ?? "$AVERDUCT_KEY"}"`);
   if (body !== undefined) {
     lines.push(`-H "Content-Type: application/json"`);
     // A single quote inside a single-quoted shell word is closed, escaped and opened again.
@@ -29,10 +32,8 @@ function curl({ method, url, body, key }: SampleRequest): string {
 }
 
 function typescript({ method, url, body, key }: SampleRequest): string {
-  const headers = [
-    ...(key === null ? [] : [`Authorization: ${JSON.stringify(`Bearer ${key}`)}`]),
-    ...(body === undefined ? [] : [`"Content-Type": "application/json"`]),
-  ];
+  const bearer = key === undefined ? "`Bearer ${process.env.AVERDUCT_KEY}`" : JSON.stringify(`Bearer ${key}`);
+  const headers = [...(key === null ? [] : [`Authorization: ${bearer}`]), ...(body === undefined ? [] : [`"Content-Type": "application/json"`])];
   const options = [
     ...(method === "GET" ? [] : [`method: "${method}"`]),
     ...(headers.length ? [`headers: { ${headers.join(", ")} }`] : []),
@@ -43,17 +44,17 @@ function typescript({ method, url, body, key }: SampleRequest): string {
 }
 
 function python({ method, url, body, key }: SampleRequest): string {
-  const headers = [
-    ...(key === null ? [] : [`"Authorization": ${JSON.stringify(`Bearer ${key}`)}`]),
-    ...(body === undefined ? [] : [`"Content-Type": "application/json"`]),
-  ];
+  const fromEnvironment = key === undefined;
+  const bearer = fromEnvironment ? `f"Bearer {os.environ['AVERDUCT_KEY']}"` : JSON.stringify(`Bearer ${key}`);
+  const headers = [...(key === null ? [] : [`"Authorization": ${bearer}`]), ...(body === undefined ? [] : [`"Content-Type": "application/json"`])];
   const given = [
     `"${url}"`,
     `method="${method}"`,
     ...(headers.length ? [`headers={${headers.join(", ")}}`] : []),
     ...(body === undefined ? [] : [`data=json.dumps(${indent(pythonLiterals(layOut(body)), 4)}).encode()`]),
   ];
-  return `import json\nimport urllib.request\n\nrequest = urllib.request.Request(\n    ${given.join(",\n    ")},\n)\nwith urllib.request.urlopen(request) as response:\n    print(json.load(response))`;
+  const imports = ["json", ...(fromEnvironment ? ["os"] : []), "urllib.request"].map((name) => `import ${name}`).join("\n");
+  return `${imports}\n\nrequest = urllib.request.Request(\n    ${given.join(",\n    ")},\n)\nwith urllib.request.urlopen(request) as response:\n    print(json.load(response))`;
 }
 
 /** JSON with one line for each list of numbers and each small object, as a person would write it. */

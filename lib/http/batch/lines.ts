@@ -1,4 +1,4 @@
-import type { ReadableStream, ReadableWritablePair } from "node:stream/web";
+import type { ReadableStream } from "node:stream/web";
 
 /** A line of a body, or the fact that it was longer than a line may be. */
 export type Line = { text: string } | { tooLong: true };
@@ -10,8 +10,9 @@ export type Line = { text: string } | { tooLong: true };
 export async function* linesOf(body: ReadableStream<Uint8Array>, maxCharacters: number): AsyncGenerator<Line[]> {
   let rest = "";
   let skipping = false;
-  for await (const text of body.pipeThrough<string>(new TextDecoderStream() as ReadableWritablePair<string, Uint8Array>)) {
-    const parts = (rest + text).split("\n");
+  const decoder = new TextDecoder();
+  for await (const bytes of body) {
+    const parts = (rest + decoder.decode(bytes, { stream: true })).split("\n");
     rest = parts.pop()!;
     const lines: Line[] = [];
     for (const part of parts) {
