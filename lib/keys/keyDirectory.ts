@@ -28,8 +28,8 @@ interface KeyRow {
   organisation_id: string;
   environment: Environment;
   secret_hash: Buffer;
-  scopes: string;
-  allowed_networks: string | null;
+  scopes: Scope[];
+  allowed_networks: string[] | null;
   expires_at: Date | null;
   revoked_at: Date | null;
   suspended_at: Date | null;
@@ -60,14 +60,13 @@ const keyRows = (db: Knex): Knex.QueryBuilder<KeyRow, KeyRow[]> =>
     );
 
 function toKey(row: KeyRow): Key {
-  const networks = row.allowed_networks === null ? null : (JSON.parse(row.allowed_networks) as string[]);
   return {
     id: row.id,
     organisationId: row.organisation_id,
     environment: row.environment,
     secretHash: row.secret_hash,
-    scopes: new Set(JSON.parse(row.scopes) as Scope[]),
-    networks: networks && networks.map((network) => ipaddr.parseCIDR(network)),
+    scopes: new Set(row.scopes),
+    networks: row.allowed_networks && row.allowed_networks.map((network) => ipaddr.parseCIDR(network)),
     expiresAt: row.expires_at?.getTime() ?? null,
     revokedAt: row.revoked_at?.getTime() ?? null,
     organisationSuspended: row.suspended_at !== null,

@@ -17,14 +17,17 @@ import { DATABASE_FOLDER } from "./withDatabase";
 const DATA_FOLDER = path.join(ROOT, ".data");
 /** A part that ends by itself is started again, at most this often. */
 const RESTART_PAUSE_MS = 1_000;
+/** What a kill -9 left behind notices it and ends within this. */
+const LEFTOVER_PATIENCE_MS = 5_000;
+const PARENT_WATCH_MS = 250;
 const UNREACHABLE_URL = "mysql://averduct@127.0.0.1:1/averduct";
 
 /** Everything from a fresh clone to a served application; ends when it is told to stop. */
 export async function start({ development }: { development: boolean }): Promise<void> {
   const given: NodeJS.ProcessEnv = { ...process.env, NODE_ENV: development ? "development" : "production" };
   const { HOST, PORT } = readConfig({ ...given, DATABASE_URL: given.DATABASE_URL ?? UNREACHABLE_URL });
-  takeFolder();
-  if (!(await isPortFree(HOST, PORT))) {
+  await takeFolder();
+  if (!(await within(LEFTOVER_PATIENCE_MS, () => isPortFree(HOST, PORT)))) {
     throw new CannotStart(`Port ${PORT} on ${HOST} is taken. Stop what uses it, or choose another: PORT=${PORT + 1} npm start`);
   }
   const url = given.AVERDUCT_URL ?? `http://localhost:${PORT}`;
@@ -52,14 +55,24 @@ export async function start({ development }: { development: boolean }): Promise<
 }
 
 /** Two starts on one data folder would run two servers on the same files. */
-function takeFolder(): void {
+async function takeFolder(): Promise<void> {
   mkdirSync(DATA_FOLDER, { recursive: true, mode: 0o700 });
   const pidFile = path.join(DATA_FOLDER, "launcher.pid");
   const pid = existsSync(pidFile) ? Number(readFileSync(pidFile, "utf8")) : 0;
-  if (pid && pid !== process.pid && isLauncher(pid)) {
+  if (pid && pid !== process.pid && !(await within(LEFTOVER_PATIENCE_MS, () => !isLauncher(pid)))) {
     throw new CannotStart(`Averduct already runs from this folder (process ${pid}). Stop it first with Ctrl-C, or: kill ${pid}`);
   }
   writeFileSync(pidFile, String(process.pid));
+}
+
+/** Asks until the answer is yes or the time is over. */
+async function within(milliseconds: number, isSo: () => boolean | Promise<boolean>): Promise<boolean> {
+  const deadline = Date.now() + milliseconds;
+  while (!(await isSo())) {
+    if (Date.now() > deadline) return false;
+    await pause(100);
+  }
+  return true;
 }
 
 function isLauncher(pid: number): boolean {
@@ -68,6 +81,13 @@ function isLauncher(pid: number): boolean {
   } catch {
     return false;
   }
+}
+
+/** Run through npm, ends with it: npm killed outright cannot pass a signal on. */
+function stopWithParent(stop: () => void): void {
+  const parent = process.ppid;
+  if (!process.env.npm_lifecycle_event) return;
+  setInterval(() => process.ppid !== parent && stop(), PARENT_WATCH_MS).unref();
 }
 
 /** What runs: the database and the application, each started again if it ends by itself. */
@@ -83,6 +103,7 @@ class Run {
     process.once("SIGINT", stop);
     process.once("SIGTERM", stop);
     process.once("SIGHUP", stop);
+    stopWithParent(stop);
   });
 
   async startDatabase(): Promise<string> {
