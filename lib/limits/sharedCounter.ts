@@ -2,8 +2,11 @@ import { RateLimiterMemory, RateLimiterMySQL, RateLimiterRes, type RateLimiterAb
 import { database } from "@/db/connection";
 import { log } from "@/lib/runtime/log";
 
-/** A shared answer that takes longer is not waited for: this instance then counts by itself. */
-const PATIENCE_MS = 250;
+/** A shared answer that takes longer is not waited for: this instance then counts by itself for a while. */
+const PATIENCE_MS = 1_000;
+const ALONE_MS = 3_000;
+/** Timers do not reach further, and a database is not away for longer. */
+const LONGEST_ALONE_SECONDS = 7 * 86_400;
 /** The limiters only count; what a plan allows is decided from the count, so they never refuse by themselves. */
 const NO_LIMIT = 2 ** 31 - 1;
 
@@ -11,10 +14,11 @@ const NO_LIMIT = 2 ** 31 - 1;
 export class SharedCounter {
   private readonly shared: RateLimiterAbstract;
   private readonly alone: RateLimiterAbstract;
+  private aloneUntil = 0;
 
   /** @param keepSeconds How long a key's count is kept after its first point. */
   constructor(keepSeconds: number) {
-    this.alone = new RateLimiterMemory({ points: NO_LIMIT, duration: keepSeconds });
+    this.alone = new RateLimiterMemory({ points: NO_LIMIT, duration: Math.min(keepSeconds, LONGEST_ALONE_SECONDS) });
     this.shared = new RateLimiterMySQL({
       storeClient: database(),
       storeType: "knex",
@@ -28,13 +32,19 @@ export class SharedCounter {
 
   /** Adds points and returns what the count was before. */
   async add(key: string, points: number): Promise<number> {
+    if (Date.now() < this.aloneUntil) return this.addAlone(key, points);
     try {
       return (await withinPatience(this.shared.consume(key, points))).consumedPoints - points;
     } catch (error) {
       if (error instanceof RateLimiterRes) return error.consumedPoints - points;
       log().warn({ err: error }, "the shared limiter does not answer; this instance counts alone");
-      return (await this.alone.consume(key, points)).consumedPoints - points;
+      this.aloneUntil = Date.now() + ALONE_MS;
+      return this.addAlone(key, points);
     }
+  }
+
+  private async addAlone(key: string, points: number): Promise<number> {
+    return (await this.alone.consume(key, points)).consumedPoints - points;
   }
 
   /** Gives points back that were taken but not spent. */
