@@ -1,7 +1,10 @@
+/** Where a value stands in a calculation's input, e.g. `["duct", "width"]`. */
+export type Path = readonly (string | number)[];
+
 /** One thing wrong with an input: where it is, a code a program can act on, and words a person can. */
 export interface InputFault {
-  /** Path from the root of the calculation's input, e.g. `["duct", "width"]`. */
-  path: (string | number)[];
+  /** Path from the root of the calculation's input. */
+  path: Path;
   /** Stable code in snake_case, e.g. `inside_dimension_not_positive`. */
   code: string;
   /** What is wrong, what it means and what to do, in one or two sentences. */

@@ -1,0 +1,68 @@
+import { AirflowInputError, type Path } from "../errors";
+import type { Air, AirState } from "../types";
+import { toSi } from "../units/convert";
+import { humidAirDensity } from "./humidAir";
+import { resolveHumidity } from "./resolveHumidity";
+import { resolvePressure } from "./resolvePressure";
+
+/** What the engine took for granted because the caller did not say. */
+export type Assumption = "standard_air" | "dry_air" | "sea_level";
+
+/** The air in the duct, in SI. */
+export interface ResolvedAir {
+  /** kg/m³. */
+  density: number;
+  /** Pa, barometric plus duct static; null where only the density is known. */
+  absolutePressure: number | null;
+  /** kg/kg; null where only the density is known. */
+  humidityRatio: number | null;
+  /** K; null where only the density is known. */
+  dryBulb: number | null;
+  assumed: Assumption[];
+}
+
+const COLDEST = 233.15;
+const HOTTEST = 473.15;
+const LEAST_DENSITY = 0.2;
+const GREATEST_DENSITY = 2.5;
+
+/**
+ * The density of the air in the duct and what it follows from.
+ * @param air Dry bulb −40 to 200 °C, absolute pressure 50 to 120 kPa; or a known density of 0.2 to 2.5 kg/m³. Left out: standard air.
+ * @param standardDensity Density in kg/m³ that is assumed where no air is described.
+ * @param path Where the air stands in the caller's input.
+ * @throws {AirflowInputError} Outside the range, or a state that cannot be; names the field.
+ */
+export function resolveAir(air: Air | undefined, standardDensity: number, path: Path = ["air"]): ResolvedAir {
+  if (!air) return { density: standardDensity, absolutePressure: null, humidityRatio: null, dryBulb: null, assumed: ["standard_air"] };
+  if ("density" in air) {
+    return { density: knownDensity(toSi("density", air.density), [...path, "density"]), absolutePressure: null, humidityRatio: null, dryBulb: null, assumed: [] };
+  }
+  return resolveState(air, path);
+}
+
+function resolveState(air: AirState, path: Path): ResolvedAir {
+  const dryBulb = toSi("temperature", air.dryBulb);
+  if (!(dryBulb >= COLDEST && dryBulb <= HOTTEST)) {
+    throw new AirflowInputError({ path: [...path, "dryBulb"], code: "temperature_out_of_range", detail: "The dry bulb is outside −40 to 200 °C (−40 to 392 °F), where the equations of humid air hold. Check the unit." });
+  }
+  const pressure = resolvePressure(air, path);
+  const humidity = resolveHumidity(air, dryBulb, pressure.absolute, path);
+  return {
+    density: humidAirDensity(dryBulb, humidity.ratio, pressure.absolute),
+    absolutePressure: pressure.absolute,
+    humidityRatio: humidity.ratio,
+    dryBulb,
+    assumed: [...(humidity.assumedDry ? (["dry_air"] as const) : []), ...(pressure.assumedSeaLevel ? (["sea_level"] as const) : [])],
+  };
+}
+
+/**
+ * Checks a density that the caller knows.
+ * @param density In kg/m³.
+ * @throws {AirflowInputError} No air between −40 and 200 °C and 50 and 120 kPa has it.
+ */
+export function knownDensity(density: number, path: Path): number {
+  if (density >= LEAST_DENSITY && density <= GREATEST_DENSITY) return density;
+  throw new AirflowInputError({ path, code: "density_out_of_range", detail: `A density of ${LEAST_DENSITY} to ${GREATEST_DENSITY} kg/m³ (0.0125 to 0.156 lb/ft³) is taken. Check the unit.` });
+}
