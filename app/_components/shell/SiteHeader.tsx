@@ -18,7 +18,7 @@ const STRANGER = [
 const MEMBER = [{ href: "/overview", label: "Portal" }];
 
 const CELL =
-  "flex min-h-11 items-center border-l px-3.5 text-small hover:bg-inset aria-[current=page]:font-semibold aria-[current=page]:shadow-[inset_0_-2px_0_var(--action)]";
+  "flex min-h-11 items-center border-l px-2 text-small whitespace-nowrap sm:px-3.5 hover:bg-inset aria-[current=page]:font-semibold aria-[current=page]:shadow-[inset_0_-2px_0_var(--action)]";
 
 /** Head of the public pages: ruled cells, as along the edge of a drawing. */
 export function SiteHeader({ signedIn = false }: SiteHeaderProps) {
