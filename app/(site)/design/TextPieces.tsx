@@ -66,7 +66,7 @@ export function TextPieces({ theme }: { theme: string }) {
         </div>
       </Piece>
       <Piece name="layout/Card">
-        <Card title="Plan" aside="Bench, monthly" foot={<span className="text-small text-muted">Renews on 1 Jan 2027</span>}>
+        <Card title="Plan" aside="renewed monthly" foot={<span className="text-small text-muted">Renews on 1 Jan 2027</span>}>
           10,000 requests a month, 10 a second.
         </Card>
       </Piece>

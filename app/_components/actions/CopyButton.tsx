@@ -36,8 +36,9 @@ export function CopyButton({ text, what = "", size = "small" }: CopyButtonProps)
 
   return (
     <>
-      <Button size={size} onClick={copy} aria-label={what ? `Copy ${what}` : undefined}>
+      <Button size={size} onClick={copy}>
         {outcome === "copied" ? "Copied" : outcome === "refused" ? "Select and copy" : "Copy"}
+        {what && <span className="sr-only">{what}</span>}
       </Button>
       <span role="status" className="sr-only">
         {outcome === "copied" && `Copied ${what}`}

@@ -19,7 +19,7 @@ interface MenuProps {
   size?: ButtonSize;
 }
 
-/** A button that opens a short list of actions or links. */
+/** A button that opens a short list of actions or links. The list stays inside its landmark; it is placed past whatever scrolls. */
 export function Menu({ label, name, items, size = "small" }: MenuProps) {
   return (
     <DropdownMenu.Root modal={false}>
@@ -31,24 +31,22 @@ export function Menu({ label, name, items, size = "small" }: MenuProps) {
           </svg>
         </Button>
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content align="end" sideOffset={4} className="z-20 min-w-44 border border-ink rounded-sheet bg-card py-1 text-ink">
-          {items.map((item) => {
-            const style =
-              "block px-3 py-1.5 text-small outline-none data-[highlighted]:bg-inset data-[disabled]:text-muted " +
-              (item.danger ? "text-rust" : "");
-            return "href" in item ? (
-              <DropdownMenu.Item key={item.label} asChild disabled={item.disabled} className={style}>
-                <Link href={item.href}>{item.label}</Link>
-              </DropdownMenu.Item>
-            ) : (
-              <DropdownMenu.Item key={item.label} disabled={item.disabled} onSelect={item.onSelect} className={style}>
-                {item.label}
-              </DropdownMenu.Item>
-            );
-          })}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
+      <DropdownMenu.Content align="end" sideOffset={4} className="z-20 min-w-44 border border-ink rounded-sheet bg-card py-1 text-ink">
+        {items.map((item) => {
+          const style =
+            "block px-3 py-1.5 text-small outline-none data-[highlighted]:bg-inset data-[disabled]:text-muted " +
+            (item.danger ? "text-rust" : "");
+          return "href" in item ? (
+            <DropdownMenu.Item key={item.label} asChild disabled={item.disabled} className={style}>
+              <Link href={item.href}>{item.label}</Link>
+            </DropdownMenu.Item>
+          ) : (
+            <DropdownMenu.Item key={item.label} disabled={item.disabled} onSelect={item.onSelect} className={style}>
+              {item.label}
+            </DropdownMenu.Item>
+          );
+        })}
+      </DropdownMenu.Content>
     </DropdownMenu.Root>
   );
 }

@@ -3,7 +3,7 @@ export type ButtonVariant = "primary" | "plain" | "danger";
 export type ButtonSize = "normal" | "small";
 
 const BASE =
-  "inline-flex items-center justify-center gap-2 border rounded-control font-medium text-center select-none " +
+  "relative inline-flex items-center justify-center gap-2 border rounded-control font-medium text-center select-none " +
   "disabled:cursor-not-allowed aria-disabled:cursor-progress disabled:border-rule disabled:bg-inset disabled:text-muted";
 
 const VARIANTS: Record<ButtonVariant, string> = {

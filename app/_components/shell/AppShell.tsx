@@ -38,7 +38,7 @@ export function AppShell({ nav, place, person, aside, signOut, children }: AppSh
         </div>
       </header>
       <div className="flex grow flex-col md:flex-row">
-        <div className="no-print border-b bg-card md:w-52 md:shrink-0 md:border-r md:border-b-0">
+        <aside aria-label="Pages and appearance" className="no-print border-b bg-card md:w-52 md:shrink-0 md:border-r md:border-b-0">
           <NavDisclosure>
             <nav aria-label={place} className="px-4 py-3">
               <NavLine groups={nav} />
@@ -47,7 +47,7 @@ export function AppShell({ nav, place, person, aside, signOut, children }: AppSh
               <ThemeChoice />
             </div>
           </NavDisclosure>
-        </div>
+        </aside>
         <main id="page" tabIndex={-1} className="min-w-0 max-w-280 grow px-4 py-5 outline-none md:px-8">
           {children}
         </main>
