@@ -47,15 +47,18 @@ export type StandardAirName = "ashrae" | "iso" | "epa" | "normal";
 
 /** One inner list for each hole or line, in the order read; null for a point that could not be read. */
 export type ReadingLines = (number | null)[][];
-export interface VelocityPressureReadings {
+interface ReadingLayout {
+  lines: ReadingLines;
+  /** For custom layouts: the weight of each point, in the shape of `lines`. Equal weights when left out. */
+  weights?: number[][];
+}
+export interface VelocityPressureReadings extends ReadingLayout {
   kind: "velocity_pressure";
   unit: PressureUnit;
-  lines: ReadingLines;
 }
-export interface VelocityReadings {
+export interface VelocityReadings extends ReadingLayout {
   kind: "velocity";
   unit: VelocityUnit;
-  lines: ReadingLines;
 }
 export type Readings = VelocityPressureReadings | VelocityReadings;
 
@@ -64,8 +67,12 @@ export interface Instrument {
   principle: InstrumentPrinciple;
   assumedDensity?: QuantityOf<"density">;
   accuracy?: { percentOfReading?: number; absolute?: QuantityOf<"pressure"> | QuantityOf<"velocity"> };
+  /** The reading counts as gain × reading + offset, the offset in the unit of the readings. */
   calibration?: { gain?: number; offset?: number };
 }
+
+/** What becomes of a velocity pressure (or velocity) below zero. */
+export type NegativeReadings = "count_as_zero" | "reject";
 
 export interface Probe {
   coefficient?: number;
@@ -84,6 +91,22 @@ export interface Design {
   airflow: QuantityOf<"airflow">;
   basis?: "actual" | "standard";
   tolerancePercent?: number;
+}
+
+/** Standard uncertainties and half-widths that the caller knows better than the defaults. */
+export interface UncertaintyOptions {
+  /** Half-width of each measured dimension. */
+  dimension?: QuantityOf<"length">;
+  /** Relative standard uncertainty of the density, in percent. */
+  densityPercent?: number;
+  /** Relative standard uncertainty of layout and count, in percent. */
+  layoutPercent?: number;
+  /** Relative standard uncertainty of the site, in percent. */
+  sitePercent?: number;
+  /** Relative standard deviation of a single reading's fluctuation, in percent. */
+  fluctuationPercent?: number;
+  /** Resolution of the readings, in their unit; the digits they were written with when left out. */
+  resolution?: number;
 }
 
 export type LayoutRule = "log_tchebycheff" | "log_linear" | "equal_area" | "method_1" | "custom";

@@ -1,0 +1,31 @@
+import { toSi } from "../units/convert";
+import type { InsideDuct } from "../duct/insideDuct";
+import type { CheckFunction } from "./context";
+
+const GREATEST_RATIO = 0.02;
+
+const smallestDimension = (inside: InsideDuct): number => {
+  switch (inside.shape) {
+    case "rectangular":
+      return Math.min(inside.width, inside.height);
+    case "round":
+      return inside.diameter;
+    case "flat_oval":
+      return inside.minor;
+  }
+};
+
+/** Whether the probe is thin enough not to change the flow it measures. */
+export const probeBlockage: CheckFunction = ({ inside, probe }) => {
+  if (!inside || !probe?.diameter) return null;
+  const ratio = toSi("length", probe.diameter) / smallestDimension(inside);
+  const passed = ratio <= GREATEST_RATIO;
+  return {
+    code: "probe_blockage",
+    passed,
+    severity: "caution",
+    detail: passed ? "The probe is thin against the duct." : "The probe is thick against the duct and speeds up the air it measures. Use a thinner probe.",
+    compared: { quantity: "probe diameter over smallest inside dimension", value: ratio, limit: GREATEST_RATIO, unit: null },
+    source: "ISO 3966, from memory",
+  };
+};

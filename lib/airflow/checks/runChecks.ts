@@ -1,0 +1,15 @@
+import type { Check } from "./check";
+import { compressibility } from "./compressibility";
+import type { CheckContext, CheckFunction } from "./context";
+import { densityAssumed } from "./densityAssumed";
+import { lowVelocity } from "./lowVelocity";
+import { negativeReading } from "./negativeReading";
+import { probeBlockage } from "./probeBlockage";
+import { profileAsymmetry } from "./profileAsymmetry";
+import { siteDisturbance } from "./siteDisturbance";
+import { uniformity } from "./uniformity";
+
+const CHECKS: CheckFunction[] = [negativeReading, uniformity, lowVelocity, profileAsymmetry, densityAssumed, compressibility, siteDisturbance, probeBlockage];
+
+/** Every check that applies to a result, in a fixed order. */
+export const runChecks = (context: CheckContext): Check[] => CHECKS.map((check) => check(context)).filter((check) => check !== null);

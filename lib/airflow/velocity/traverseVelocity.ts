@@ -1,0 +1,36 @@
+import type { ResolvedAir } from "../air/resolveAir";
+import { readPoints, type ReadPoint } from "../readings/readPoints";
+import type { Instrument, NegativeReadings, Probe, Readings } from "../types";
+import { weightedMean } from "./mean";
+import { pointVelocities, probeCoefficient, type PointVelocities } from "./pointVelocities";
+import { velocityFromPressure } from "./velocityFromPressure";
+
+/** The velocities of a traverse, in SI. */
+export interface TraverseVelocity extends PointVelocities {
+  points: ReadPoint[];
+  skipped: number;
+  /** m/s. */
+  average: number;
+  /** What the velocity of the mean velocity pressure would have been, in m/s; null for velocity readings. */
+  fromAveragePressure: number | null;
+}
+
+/**
+ * From readings to the average velocity. Velocities are averaged, never pressures: the velocity of a mean pressure
+ * overstates the flow wherever the profile is not flat.
+ */
+export function traverseVelocity(
+  readings: Readings,
+  air: ResolvedAir,
+  standardDensity: number,
+  { probe, instrument, negativeReadings }: { probe?: Probe; instrument?: Instrument; negativeReadings?: NegativeReadings },
+): TraverseVelocity {
+  const { points, skipped } = readPoints(readings, instrument, negativeReadings);
+  const found = pointVelocities(readings, points, air, probe, instrument, standardDensity);
+  const weights = points.map(({ weight }) => weight);
+  const fromAveragePressure =
+    readings.kind === "velocity_pressure"
+      ? velocityFromPressure(weightedMean(points.map(({ reading }) => reading), weights), air.density, probeCoefficient(probe))
+      : null;
+  return { ...found, points, skipped, average: weightedMean(found.velocities, weights), fromAveragePressure };
+}
