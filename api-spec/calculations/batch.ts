@@ -1,11 +1,10 @@
 import { z } from "zod";
+import { CALCULATIONS } from "@/lib/airflow/calculations";
 import { defineOperation } from "../define";
 
 /** The calculations a batch may mix, by the last part of their path. */
-export const BATCH_OPERATIONS = [
-  "duct-area", "traverse-plan", "air-density", "density-correction", "average-velocity", "airflow", "reconciliation", "fan-adjustment", "system-balance",
-] as const;
-export type BatchOperationName = (typeof BATCH_OPERATIONS)[number];
+export type BatchOperationName = keyof typeof CALCULATIONS;
+const BATCH_OPERATIONS = Object.keys(CALCULATIONS) as [BatchOperationName, ...BatchOperationName[]];
 
 export const MOST_BATCH_ITEMS = 1_000;
 export const MOST_BATCH_LINES = 100_000;
