@@ -30,7 +30,9 @@ function exponentOf(readings: Readings, instrument: Instrument | undefined): num
 export const densityAssumed: CheckFunction = ({ air: { assumed }, readings, instrument }) => {
   const untold = readings.kind === "velocity" && !instrument;
   const exponent = exponentOf(readings, instrument);
-  const couldMove = Math.max(0, ...assumed.map((one) => 100 * (DENSITY_RATIO[one] ** exponent - 1)));
+  // Where the velocity does not depend on density, the mass still does.
+  const [moves, power] = exponent === 0 ? ["standard and mass airflow", 1] : ["average velocity", exponent];
+  const couldMove = Math.max(0, ...assumed.map((one) => 100 * Math.abs(DENSITY_RATIO[one] ** power - 1)));
   const passed = assumed.length === 0 && !untold;
   const reasons = [...assumed.map((one) => `${WORDS[one]} was assumed`), ...(untold ? ["the instrument's principle was not given, so its velocities were taken as actual"] : [])];
   return {
@@ -39,8 +41,8 @@ export const densityAssumed: CheckFunction = ({ air: { assumed }, readings, inst
     severity: "caution",
     detail: passed
       ? "The density follows from what was measured."
-      : `${reasons.join("; ").replace(/^./, (first) => first.toUpperCase())}. At 5,000 ft, or in saturated air, the average velocity would move by up to ${couldMove.toPrecision(2)} percent. Give the air's temperature, humidity and altitude.`,
-    compared: { quantity: "possible shift of the average velocity", value: couldMove, limit: 0, unit: "percent" },
+      : `${reasons.join("; ").replace(/^./, (first) => first.toUpperCase())}. At 5,000 ft, or in saturated air, the ${moves} would move by up to ${couldMove.toPrecision(2)} percent. Give the air's temperature, humidity and altitude.`,
+    compared: { quantity: `possible shift of the ${moves}`, value: couldMove, limit: 0, unit: "percent" },
     source: "US Standard Atmosphere 1976 and humid-air equations, at 5,000 ft and at 80 °F",
   };
 };
