@@ -1,9 +1,7 @@
-import type { Metadata } from "next";
 import { LinkButton } from "../_components/actions/LinkButton";
+import { OperationIndex } from "../_components/home/OperationIndex";
 import { TraverseSheet } from "../_components/home/TraverseSheet";
 import { SectionHead } from "../_components/layout/SectionHead";
-
-export const metadata: Metadata = { alternates: { canonical: "/" } };
 
 const NOTES = [
   { head: "The working is in the answer.", text: "Equation, inputs, value and source of every step. A reviewer can redo it by hand." },
@@ -35,19 +33,22 @@ export default function HomePage() {
         <TraverseSheet />
       </div>
       <div>
-          <SectionHead measure={NOTES.length}>Notes</SectionHead>
-          <ol className="text-small">
-            {NOTES.map(({ head, text }, index) => (
-              <li key={head} className="grid grid-cols-[1.5rem_1fr] border-t py-2">
-                <span aria-hidden className="font-mono text-muted">
-                  {index + 1}
-                </span>
-                <span>
-                  <strong className="font-semibold">{head}</strong> <span className="text-muted">{text}</span>
-                </span>
-              </li>
-            ))}
-          </ol>
+        <SectionHead measure={NOTES.length}>Notes</SectionHead>
+        <ol className="text-small">
+          {NOTES.map(({ head, text }, index) => (
+            <li key={head} className="grid grid-cols-[1.5rem_1fr] border-t py-2">
+              <span aria-hidden className="font-mono text-muted">
+                {index + 1}
+              </span>
+              <span>
+                <strong className="font-semibold">{head}</strong> <span className="text-muted">{text}</span>
+              </span>
+            </li>
+          ))}
+        </ol>
+      </div>
+      <div className="min-w-0 lg:col-span-2">
+        <OperationIndex />
       </div>
     </div>
   );

@@ -14,6 +14,8 @@ export interface Sample {
 interface CodeBlockProps {
   /** What the code is: "Request", "Answer". */
   title: string;
+  /** Only read out: where a heading or a tab beside it says it already. */
+  hideTitle?: boolean;
   /** One text, or the same thing in several languages on tabs. */
   samples: Sample[];
   /** CSS length above which it scrolls within. */
@@ -21,7 +23,7 @@ interface CodeBlockProps {
 }
 
 /** Code to read and to copy. Where there are several languages, the choice holds for every block and is remembered. */
-export function CodeBlock({ title, samples, maxHeight = "26rem" }: CodeBlockProps) {
+export function CodeBlock({ title, hideTitle = false, samples, maxHeight = "26rem" }: CodeBlockProps) {
   const chosen = useSyncExternalStore(onLanguageChosen, chosenLanguage, () => null);
   const first = samples[0];
   if (!first) return null;
@@ -30,8 +32,8 @@ export function CodeBlock({ title, samples, maxHeight = "26rem" }: CodeBlockProp
   if (samples.length === 1) {
     return (
       <figure className="min-w-0">
-        <figcaption className="flex items-end justify-between gap-3 pb-1.5">
-          <span className="text-small font-semibold">{title}</span>
+        <figcaption className="relative flex items-end justify-between gap-3 pb-1.5">
+          <span className={hideTitle ? "sr-only" : "text-small font-semibold"}>{title}</span>
           <CopyButton text={first.code} what={title.toLowerCase()} />
         </figcaption>
         <Code title={title} code={first.code} maxHeight={maxHeight} />
@@ -40,7 +42,7 @@ export function CodeBlock({ title, samples, maxHeight = "26rem" }: CodeBlockProp
   }
   return (
     <div className="min-w-0">
-      <p className="text-small font-semibold">{title}</p>
+      {!hideTitle && <p className="text-small font-semibold">{title}</p>}
       <Tabs
         label={`${title}: language`}
         value={current.language}

@@ -1,11 +1,11 @@
 import type { WorkingStep } from "@/lib/airflow/working/working";
-import { formatNumber, unitSymbol } from "../format/number";
+import { formatQuantity } from "../format/number";
 import { Table } from "./Table";
 
 /** The steps of a result, complete enough to be redone by hand. */
-export function WorkingTable({ steps }: { steps: WorkingStep[] }) {
+export function WorkingTable({ steps, maxHeight }: { steps: WorkingStep[]; maxHeight?: string }) {
   return (
-    <Table caption="Working" hideCaption>
+    <Table caption="Working" hideCaption maxHeight={maxHeight}>
       <thead>
         <tr>
           <th scope="col">Step</th>
@@ -20,24 +20,22 @@ export function WorkingTable({ steps }: { steps: WorkingStep[] }) {
       <tbody>
         {steps.map(({ step, equation, inputs, value, source }, index) => (
           <tr key={index}>
-            <th scope="row" className="min-w-40">
+            <th scope="row" className="min-w-32">
               {index + 1}. {step}
             </th>
-            <td className="min-w-44 font-mono">{equation}</td>
+            <td className="min-w-40 font-mono">{equation}</td>
             <td className="font-mono">
               {Object.entries(inputs).map(([symbol, input]) => (
                 <span key={symbol} className="block whitespace-nowrap">
-                  {symbol} = {measure(input)}
+                  {symbol} = {formatQuantity(input)}
                 </span>
               ))}
             </td>
-            <td className="numeric font-semibold">{measure(value)}</td>
-            <td className="min-w-44 text-muted">{source}</td>
+            <td className="numeric font-semibold">{formatQuantity(value)}</td>
+            <td className="min-w-36 text-muted">{source}</td>
           </tr>
         ))}
       </tbody>
     </Table>
   );
 }
-
-const measure = ({ value, unit }: { value: number; unit: string }) => `${formatNumber(value)}${unit ? ` ${unitSymbol(unit)}` : ""}`;

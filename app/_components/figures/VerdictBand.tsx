@@ -1,8 +1,7 @@
+import type { Verdict } from "@/lib/airflow/uncertainty/verdict";
 import { formatNumber, unitSymbol } from "../format/number";
 import { Status } from "../layout/Status";
 import type { Standing } from "../layout/signs";
-
-export type Verdict = "within" | "outside" | "undecided";
 
 interface VerdictBandProps {
   measured: number;

@@ -10,6 +10,8 @@ const BELOW = 13.9;
 const ABOVE = -6.5;
 /** Fraction of the width within which digits centred on a point would cross the wall. */
 const NEAR_WALL = 0.06;
+/** Kept between digits and the wall. */
+const CLEAR = 3;
 /** More, where a ring stands between. */
 const PAST_RING = RING - 3;
 
@@ -30,7 +32,7 @@ export function placeLabel(point: FigurePoint, duct: DuctOutline, height: number
   const past = point.suspected ? PAST_RING : 0;
   const below: LabelPlace = { x: 0, y: BELOW + past, textAnchor: "middle" };
   const above: LabelPlace = { x: 0, y: ABOVE - past, textAnchor: "middle" };
-  if (duct.shape === "rectangular") return point.y * height + below.y > height ? above : below;
+  if (duct.shape === "rectangular") return point.y * height + below.y + CLEAR > height ? above : below;
   if (point.x === 0.5) return { x: 8 + past, y: 3.7, textAnchor: "start" };
   const level = point.point % 2 === 1 ? above : below;
   if (point.x < NEAR_WALL) return { ...level, x: -4.5, textAnchor: "start" };

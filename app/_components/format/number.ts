@@ -41,6 +41,8 @@ const UNIT_SYMBOLS: Record<string, string> = {
   "m3/s": "m³/s",
   "m3/h": "m³/h",
   percent: "%",
+  // UCUM's name for a bare ratio.
+  "1": "",
 };
 
 /** `ft3/min` → "ft³/min". A name without another symbol is its own. */
@@ -48,7 +50,7 @@ export const unitSymbol = (unit: string): string => UNIT_SYMBOLS[unit] ?? unit;
 
 /** Writes a quantity with its unit: `{ value: 2600, unit: "ft3/min" }` → "2,600 ft³/min". The space does not break. */
 export const formatQuantity = ({ value, unit }: { value: number; unit: string }, style?: NumberStyle): string =>
-  `${formatNumber(value, style)}\u00a0${unitSymbol(unit)}`;
+  `${formatNumber(value, style)}\u00a0${unitSymbol(unit)}`.trimEnd();
 
 /** `0.123` → "12.3 %". */
 export const formatShare = (share: number, decimals = 1): string => `${formatNumber(share * 100, { decimals })}\u00a0%`;

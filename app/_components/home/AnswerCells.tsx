@@ -1,10 +1,10 @@
+import type { AirflowAnswer } from "@/lib/airflow/calculations/airflow";
 import type { Quantity } from "@/lib/airflow/units/units";
 import { ChecksList } from "../data/ChecksList";
 import { VerdictBand } from "../figures/VerdictBand";
 import { formatNumber, unitSymbol } from "../format/number";
 import { Notice } from "../layout/Notice";
 import { Loading } from "../mark/Loading";
-import type { AirflowAnswer } from "./airflowAnswer";
 import type { Outcome } from "./useTryAirflow";
 
 interface AnswerCellsProps {
@@ -12,11 +12,10 @@ interface AnswerCellsProps {
   pending: boolean;
   /** A blank is empty or holds no number, so that nothing was sent. */
   incomplete: boolean;
-  design: number | null;
 }
 
 /** What the API answered to the sheet, or why it did not. */
-export function AnswerCells({ outcome, pending, incomplete, design }: AnswerCellsProps) {
+export function AnswerCells({ outcome, pending, incomplete }: AnswerCellsProps) {
   if (incomplete) {
     return (
       <div className="px-3.5 py-3">
@@ -41,19 +40,23 @@ export function AnswerCells({ outcome, pending, incomplete, design }: AnswerCell
       {outcome?.kind === "refused" && (
         <div className="px-3.5 py-3">
           <Notice kind="failure" title={`${outcome.status} ${outcome.problem.title ?? "Refused"}`} live>
-            <p>{outcome.problem.detail}</p>
-            <ul>
-              {outcome.problem.errors?.map(({ pointer, detail }) => (
-                <li key={`${pointer} ${detail}`}>
-                  {pointer && <code>{pointer} </code>}
-                  {detail !== outcome.problem.detail && detail}
-                </li>
-              ))}
-            </ul>
+            {/* The detail sums up the errors; one of the two is enough. */}
+            {outcome.problem.errors?.length ? (
+              <ul>
+                {outcome.problem.errors.map(({ pointer, detail }) => (
+                  <li key={`${pointer} ${detail}`}>
+                    {pointer && <code>{pointer}: </code>}
+                    {detail}
+                  </li>
+                ))}
+              </ul>
+            ) : (
+              <p>{outcome.problem.detail}</p>
+            )}
           </Notice>
         </div>
       )}
-      {outcome?.kind === "answered" && <Answered {...outcome} design={design} pending={pending} />}
+      {outcome?.kind === "answered" && <Answered {...outcome} pending={pending} />}
     </div>
   );
 }
@@ -62,12 +65,11 @@ interface AnsweredProps {
   answer: AirflowAnswer;
   status: number;
   milliseconds: number;
-  design: number | null;
   pending: boolean;
 }
 
-function Answered({ answer, status, milliseconds, design, pending }: AnsweredProps) {
-  const { airflow, averageVelocity, area, air, uncertainty } = answer;
+function Answered({ answer, status, milliseconds, pending }: AnsweredProps) {
+  const { airflow, averageVelocity, area, air, uncertainty, design } = answer;
   return (
     <div className="grid gap-px bg-rule md:grid-cols-[minmax(0,20rem)_1fr]">
       <div className="bg-card px-3.5 py-3">
@@ -81,11 +83,9 @@ function Answered({ answer, status, milliseconds, design, pending }: AnsweredPro
           {formatNumber(airflow.actual.value, { decimals: 0 })}
           <span className="ml-2 text-small font-normal text-muted">{unitSymbol(airflow.actual.unit)}</span>
         </p>
-        {uncertainty && (
-          <p className="font-mono text-small text-muted">
-            ± {formatNumber(uncertainty.expanded.value, { decimals: 0 })} (k = 2)
-          </p>
-        )}
+        <p className="font-mono text-small text-muted">
+          ± {formatNumber(uncertainty.expanded.value, { decimals: 0 })} (k = {formatNumber(uncertainty.coverageFactor)})
+        </p>
         <dl className="mt-2 border-t text-small">
           <Line term="Standard" quantity={airflow.standard} decimals={0} />
           <Line term="Mass" quantity={airflow.mass} decimals={1} />
@@ -95,14 +95,14 @@ function Answered({ answer, status, milliseconds, design, pending }: AnsweredPro
         </dl>
       </div>
       <div className="grid content-start gap-3 bg-card px-3.5 py-3">
-        {answer.design && design !== null && (
+        {design && (
           <VerdictBand
             measured={airflow.actual.value}
-            design={design}
-            tolerancePercent={10}
-            expandedUncertainty={uncertainty?.expanded.value ?? null}
-            unit={airflow.actual.unit}
-            verdict={answer.design.verdict}
+            design={design.airflow.value}
+            tolerancePercent={design.tolerancePercent}
+            expandedUncertainty={design.expandedUncertainty.value}
+            unit={design.airflow.unit}
+            verdict={design.verdict}
           />
         )}
         <ChecksList checks={answer.checks} />

@@ -44,7 +44,7 @@ export function ReadingsGrid({ lines, onChange }: ReadingsGridProps) {
                     value={line[point] ?? ""}
                     onChange={(event) => onChange(index, point, event.target.value)}
                     aria-invalid={Number.isNaN(numberIn(line[point] ?? "")) || undefined}
-                    className="block h-9.5 w-full min-w-0 bg-transparent px-1 text-center focus:bg-action-wash aria-[invalid=true]:text-rust aria-[invalid=true]:underline"
+                    className="block h-9.5 w-full min-w-0 bg-transparent px-1 text-center -outline-offset-2 focus:bg-action-wash aria-[invalid=true]:text-rust aria-[invalid=true]:underline"
                   />
                 </td>
               ))}

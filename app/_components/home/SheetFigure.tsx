@@ -1,5 +1,5 @@
+import type { AirflowAnswer } from "@/lib/airflow/calculations/airflow";
 import { CrossSection } from "../figures/CrossSection";
-import type { AirflowAnswer } from "./airflowAnswer";
 import { numberIn, type SheetEntries } from "./example";
 
 /** Five points by log-Tchebycheff, as fractions of the side. ISO 3966. */
@@ -13,7 +13,7 @@ export function SheetFigure({ entries, answer }: { entries: SheetEntries; answer
     return <p className="text-small text-muted">No duct is left inside these dimensions and this lining.</p>;
   }
   const suspected = new Set(answer?.checks.find(({ code, passed }) => code === "possible_slip" && !passed)?.at?.map(({ line, point }) => `${line}/${point}`));
-  const velocities = new Map(answer?.points.map(({ line, point, velocity }) => [`${line}/${point}`, velocity?.value ?? null]));
+  const velocities = new Map(answer?.points.map(({ line, point, velocity }) => [`${line}/${point}`, velocity.value]));
 
   return (
     <CrossSection

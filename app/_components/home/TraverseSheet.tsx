@@ -1,10 +1,11 @@
 "use client";
 
-import { useState, useSyncExternalStore, type ReactNode } from "react";
+import { useState, useSyncExternalStore } from "react";
 import { Button } from "../actions/Button";
 import { CodeBlock } from "../code/CodeBlock";
 import { layOut, requestSamples } from "../code/requestSamples";
 import { WorkingTable } from "../data/WorkingTable";
+import { UncertaintyBars } from "../figures/UncertaintyBars";
 import { Tabs } from "../layout/Tabs";
 import { AnswerCells } from "./AnswerCells";
 import { airflowRequest, EXAMPLE, numberIn, SLIP, type SheetEntries, type SheetField } from "./example";
@@ -65,34 +66,27 @@ export function TraverseSheet() {
           <SheetFigure entries={entries} answer={answer} />
         </div>
       </div>
-      <AnswerCells outcome={outcome} pending={pending} incomplete={request === null} design={numberIn(entries.fields.design)} />
+      <AnswerCells outcome={outcome} pending={pending} incomplete={request === null} />
       <div className="border-t px-3.5 py-3">
         <Tabs
           label="The calculation behind the sheet"
           tabs={[
-            { id: "working", label: "Working", content: answer ? <Within><WorkingTable steps={answer.working} /></Within> : <None /> },
+            { id: "working", label: "Working", content: answer?.working ? <WorkingTable steps={answer.working} maxHeight="20rem" /> : <None /> },
+            { id: "uncertainty", label: "Uncertainty", content: answer ? <UncertaintyBars {...answer.uncertainty} /> : <None /> },
             {
               id: "request",
               label: "Request",
               content: request ? (
-                <CodeBlock title="Request" maxHeight="20rem" samples={requestSamples({ method: "POST", url: `${origin}/api/v1/calculations/airflow`, body: request })} />
+                <CodeBlock title="Request" hideTitle maxHeight="20rem" samples={requestSamples({ method: "POST", url: `${origin}/api/v1/calculations/airflow`, body: request })} />
               ) : (
                 <None />
               ),
             },
-            { id: "answer", label: "Answer", content: answer ? <CodeBlock title="Answer" maxHeight="20rem" samples={[{ language: "JSON", code: layOut(answer) }]} /> : <None /> },
+            { id: "answer", label: "Answer", content: answer ? <CodeBlock title="Answer" hideTitle maxHeight="20rem" samples={[{ language: "JSON", code: layOut(answer) }]} /> : <None /> },
           ]}
         />
       </div>
     </section>
-  );
-}
-
-function Within({ children }: { children: ReactNode }) {
-  return (
-    <div role="region" aria-label="Working, scrolls" tabIndex={0} className="max-h-80 overflow-y-auto">
-      {children}
-    </div>
   );
 }
 
@@ -110,7 +104,7 @@ interface BlankProps {
 function Blank({ name, label, unit, value, onChange }: BlankProps) {
   const wrong = Number.isNaN(numberIn(value) ?? Number.NaN);
   return (
-    <div className="bg-card px-3 py-1.5 focus-within:bg-action-wash">
+    <div className="bg-card px-3 py-1.5 focus-within:bg-action-wash focus-within:outline-2 focus-within:-outline-offset-2 focus-within:outline-action">
       <label htmlFor={`sheet-${name}`} className="block text-fine text-muted">
         {label}
       </label>
@@ -123,7 +117,7 @@ function Blank({ name, label, unit, value, onChange }: BlankProps) {
           onChange={(event) => onChange(event.target.value)}
           aria-invalid={wrong || undefined}
           aria-describedby={wrong ? `sheet-${name}-error` : undefined}
-          className="min-w-0 flex-1 border-b border-b-edge bg-transparent py-0.5 font-mono aria-[invalid=true]:border-b-rust"
+          className="min-w-0 flex-1 border-b border-b-edge bg-transparent py-0.5 font-mono outline-none aria-[invalid=true]:border-b-rust"
         />
         <span className="font-mono text-fine text-muted">{unit}</span>
       </div>

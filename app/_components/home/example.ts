@@ -1,4 +1,4 @@
-import type { AirState, Design, RectangularDuct, VelocityPressureReadings } from "@/lib/airflow/types";
+import type { AirflowInput } from "@/lib/airflow/calculations/airflow";
 
 export type SheetField = "width" | "height" | "lining" | "dryBulb" | "humidity" | "altitude" | "design";
 
@@ -24,21 +24,11 @@ export const EXAMPLE: SheetEntries = {
 /** The reading that the demonstration of a slip writes with two digits swapped, counted from 0. */
 export const SLIP = { line: 1, point: 1, written: "0.016" };
 
-/** The body that the sheet stands for. */
-export interface AirflowRequest {
-  duct: RectangularDuct;
-  layout: "log_tchebycheff";
-  readings: VelocityPressureReadings;
-  air: AirState;
-  design: Design;
-  working: true;
-}
-
 /** The number in a blank; null for an empty one, NaN for what is no number. */
 export const numberIn = (text: string): number | null => (text.trim() === "" ? null : Number(text.trim()));
 
 /** The request that the sheet stands for; null while a field is empty or a blank holds no number. */
-export function airflowRequest({ fields, lines }: SheetEntries): AirflowRequest | null {
+export function airflowRequest({ fields, lines }: SheetEntries): AirflowInput | null {
   const entered = Object.entries(fields).map(([name, text]) => [name, numberIn(text) ?? Number.NaN] as const);
   const readings = lines.map((line) => line.map(numberIn));
   if (entered.some(([, value]) => Number.isNaN(value)) || readings.flat().some(Number.isNaN)) return null;

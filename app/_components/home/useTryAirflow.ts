@@ -1,6 +1,5 @@
 import { useEffect, useState } from "react";
-import type { AirflowAnswer } from "./airflowAnswer";
-import type { AirflowRequest } from "./example";
+import type { AirflowAnswer, AirflowInput } from "@/lib/airflow/calculations/airflow";
 
 /** RFC 9457, as far as the sheet shows it. */
 interface ProblemDocument {
@@ -23,7 +22,7 @@ const ADDRESS = "/api/portal/try/airflow";
  *
  * @param request - Null while there is nothing fit to send.
  */
-export function useTryAirflow(request: AirflowRequest | null): { outcome: Outcome | null; pending: boolean } {
+export function useTryAirflow(request: AirflowInput | null): { outcome: Outcome | null; pending: boolean } {
   const body = request && JSON.stringify(request);
   const [settled, setSettled] = useState<{ body: string; outcome: Outcome } | null>(null);
 
