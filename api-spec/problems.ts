@@ -117,6 +117,48 @@ export const PROBLEMS = {
     meaning: "Something went wrong that the request did not cause. It is in our log under the request id.",
     remedy: "Try again once; if it persists, report the request id.",
   },
+  "not-signed-in": {
+    status: 401,
+    title: "Nobody is signed in",
+    meaning: "The portal needs to know who asks; there is no session or it has ended.",
+    remedy: "Sign in and try again.",
+  },
+  "sign-in-refused": {
+    status: 401,
+    title: "E-mail and password do not belong together",
+    meaning: "There is no account with this pair of e-mail and password.",
+    remedy: "Check both, or reset the password.",
+  },
+  "too-many-attempts": {
+    status: 429,
+    title: "Too many failed attempts",
+    meaning: "There were too many failed sign-ins from this address.",
+    remedy: "Wait for the time in Retry-After, or reset the password.",
+  },
+  "role-not-sufficient": {
+    status: 403,
+    title: "Your role does not allow this",
+    meaning: "Viewers read; developers also change keys, webhooks and records; owners do everything.",
+    remedy: "Ask an owner of the organisation.",
+  },
+  "email-not-verified": {
+    status: 403,
+    title: "The e-mail address is not confirmed yet",
+    meaning: "Keys can be made once the e-mail address has been confirmed.",
+    remedy: "Open the link in the e-mail, or have it sent again.",
+  },
+  "forbidden-origin": {
+    status: 403,
+    title: "The request came from another site",
+    meaning: "The portal takes changes only from its own pages.",
+    remedy: "Use the portal itself; programs use the API with a key.",
+  },
+  "link-not-valid": {
+    status: 410,
+    title: "The link is not valid",
+    meaning: "The link was used already, has expired, or a newer one was sent.",
+    remedy: "Ask for a new link.",
+  },
   "temporarily-unavailable": {
     status: 503,
     title: "Not available at this moment",

@@ -1,6 +1,6 @@
-import { RateLimiterMemory, RateLimiterMySQL, RateLimiterRes, type RateLimiterAbstract } from "rate-limiter-flexible";
-import { database } from "@/db/connection";
+import { RateLimiterMemory, RateLimiterRes, type RateLimiterAbstract } from "rate-limiter-flexible";
 import { log } from "@/lib/runtime/log";
+import { storedLimiter } from "./storedLimiter";
 
 /** A shared answer that takes longer is not waited for: this instance then counts by itself for a while. */
 const PATIENCE_MS = 1_000;
@@ -19,15 +19,7 @@ export class SharedCounter {
   /** @param keepSeconds How long a key's count is kept after its first point. */
   constructor(keepSeconds: number) {
     this.alone = new RateLimiterMemory({ points: NO_LIMIT, duration: Math.min(keepSeconds, LONGEST_ALONE_SECONDS) });
-    this.shared = new RateLimiterMySQL({
-      storeClient: database(),
-      storeType: "knex",
-      dbName: String(database().client.config.connection.database),
-      tableName: "rate_limits",
-      tableCreated: true,
-      points: NO_LIMIT,
-      duration: keepSeconds,
-    });
+    this.shared = storedLimiter(NO_LIMIT, keepSeconds);
   }
 
   /** Adds points and returns what the count was before. */

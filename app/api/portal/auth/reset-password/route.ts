@@ -1,0 +1,10 @@
+import { z } from "zod";
+import { resetPassword } from "@/lib/accounts/resetPassword";
+import { portalOperation } from "@/lib/http/portalOperation";
+
+const body = z.strictObject({ token: z.string().max(100), password: z.string() });
+
+export const POST = portalOperation({ access: "anyone", body }, async ({ input }) => {
+  await resetPassword(input);
+  return {};
+});

@@ -1,0 +1,11 @@
+import { z } from "zod";
+import { signUp } from "@/lib/accounts/signUp";
+import { emailAddress, personName } from "@/lib/accounts/fields";
+import { portalOperation } from "@/lib/http/portalOperation";
+
+const body = z.strictObject({ email: emailAddress, name: personName, organisation: personName, password: z.string() });
+
+export const POST = portalOperation({ access: "anyone", body, status: 201 }, async ({ input }) => {
+  await signUp(input);
+  return {};
+});

@@ -1,0 +1,8 @@
+import { z } from "zod";
+import { verifyEmail } from "@/lib/accounts/verifyEmail";
+import { sessionCookie } from "@/lib/http/cookies";
+import { portalOperation } from "@/lib/http/portalOperation";
+
+const body = z.strictObject({ token: z.string().max(100) });
+
+export const POST = portalOperation({ access: "anyone", body }, async ({ input, userAgent }) => ({ cookie: sessionCookie(await verifyEmail(input.token, userAgent)) }));

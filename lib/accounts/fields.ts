@@ -1,0 +1,13 @@
+import { z } from "zod";
+
+/** Fields that several of the portal's forms have. */
+
+export const emailAddress = z.string().trim().toLowerCase().pipe(z.email("This is not an e-mail address.").max(254));
+
+// Control characters would break e-mail headers and log lines.
+export const personName = z
+  .string()
+  .trim()
+  .min(1, "This must not be empty.")
+  .max(120)
+  .regex(/^\P{Cc}*$/u, "Control characters are not taken here.");
