@@ -34,7 +34,9 @@ export function CodeBlock({ title, hideTitle = false, samples, maxHeight = "26re
       <figure className="min-w-0">
         <figcaption className="relative flex items-end justify-between gap-3 pb-1.5">
           <span className={hideTitle ? "sr-only" : "text-small font-semibold"}>{title}</span>
-          <CopyButton text={first.code} what={title.toLowerCase()} />
+          <span className="ml-auto">
+            <CopyButton text={first.code} what={title.toLowerCase()} />
+          </span>
         </figcaption>
         <Code title={title} code={first.code} maxHeight={maxHeight} />
       </figure>

@@ -57,10 +57,12 @@ function python({ method, url, body, key }: SampleRequest): string {
   return `${imports}\n\nrequest = urllib.request.Request(\n    ${given.join(",\n    ")},\n)\nwith urllib.request.urlopen(request) as response:\n    print(json.load(response))`;
 }
 
+const LONGEST_LINE = 92;
+
 /** JSON with one line for each list of numbers and each small object, as a person would write it. */
 export function layOut(value: unknown, depth = 0): string {
   const oneLine = JSON.stringify(value, null, 1)?.replace(/\s*\n\s*/g, " ") ?? "null";
-  if (value === null || typeof value !== "object" || oneLine.length + depth * 2 <= 72) return oneLine;
+  if (value === null || typeof value !== "object" || oneLine.length + depth * 2 <= LONGEST_LINE) return oneLine;
   const inner = "  ".repeat(depth + 1);
   const outer = "  ".repeat(depth);
   if (Array.isArray(value)) return `[\n${value.map((item) => inner + layOut(item, depth + 1)).join(",\n")}\n${outer}]`;

@@ -23,11 +23,11 @@ export function OperationIndex() {
         ))}
       </ul>
       <p className="mt-3 max-w-2xl">
-        Records, instruments, certificates, webhooks and batches are in the{" "}
+        Records, instruments, certificates and webhooks are in the{" "}
         <Link href="/docs/reference" className="link">
           API reference
         </Link>
-        . Each operation there has an example that runs.
+        , each operation with an example that runs.
       </p>
     </section>
   );

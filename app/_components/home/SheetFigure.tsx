@@ -10,7 +10,7 @@ export function SheetFigure({ entries, answer }: { entries: SheetEntries; answer
   const [width, height, lining] = [entries.fields.width, entries.fields.height, entries.fields.lining].map((text) => numberIn(text) ?? 0);
   const inside = { width: (width ?? 0) - 2 * (lining ?? 0), height: (height ?? 0) - 2 * (lining ?? 0) };
   if (!(inside.width > 0) || !(inside.height > 0)) {
-    return <p className="text-small text-muted">No duct is left inside these dimensions and this lining.</p>;
+    return <p className="text-small text-muted">These dimensions and this lining leave no duct to draw.</p>;
   }
   const suspected = new Set(answer?.checks.find(({ code, passed }) => code === "possible_slip" && !passed)?.at?.map(({ line, point }) => `${line}/${point}`));
   const velocities = new Map(answer?.points.map(({ line, point, velocity }) => [`${line}/${point}`, velocity.value]));

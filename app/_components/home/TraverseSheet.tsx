@@ -51,7 +51,7 @@ export function TraverseSheet() {
         <div className="bg-card px-3.5 py-3">
           <ReadingsGrid lines={entries.lines} onChange={setReading} />
           <p className="mt-3 text-small">
-            Change any figure; the API calculates the sheet again. Or swap two digits of hole {SLIP.line + 1}, point {SLIP.point + 1}, and see it noticed.
+            Change any figure; the API calculates the sheet again. Or swap two digits of hole {SLIP.line + 1}, point {SLIP.point + 1}, and watch the figure and the checks.
           </p>
           <div className="mt-2 flex gap-2">
             <Button size="small" onClick={() => setReading(SLIP.line, SLIP.point, SLIP.written)}>
