@@ -10,6 +10,7 @@ import { Menu } from "../../_components/actions/Menu";
 import { CodeBlock } from "../../_components/code/CodeBlock";
 import { requestSamples } from "../../_components/code/requestSamples";
 import { Secret } from "../../_components/code/Secret";
+import { LoadMore } from "../../_components/data/LoadMore";
 import { Tabs } from "../../_components/layout/Tabs";
 import { Piece } from "./Piece";
 
@@ -22,6 +23,7 @@ const SAMPLES = requestSamples({
 
 export function ActionPieces({ theme }: { theme: string }) {
   const [open, setOpen] = useState(false);
+  const [shown, setShown] = useState(50);
   return (
     <>
       <Piece name="actions/Button, LinkButton, CopyButton, Menu">
@@ -68,6 +70,9 @@ export function ActionPieces({ theme }: { theme: string }) {
         <Dialog open={open} onClose={() => setOpen(false)} title="Rotate the key" actions={<Button onClick={() => setOpen(false)}>Close</Button>}>
           Both keys work until the overlap ends.
         </Dialog>
+      </Piece>
+      <Piece name="data/LoadMore">
+        <LoadMore shown={shown} noun="request" more={shown < 150} pending={false} onMore={() => setShown(shown + 50)} />
       </Piece>
       <Piece name="layout/Tabs">
         <Tabs

@@ -1,5 +1,9 @@
+import { airflow, type AirflowInput } from "@/lib/airflow/calculations/airflow";
+import { ChecksList } from "../../_components/data/ChecksList";
+import { WorkingTable } from "../../_components/data/WorkingTable";
 import { CrossSection } from "../../_components/figures/CrossSection";
 import { DimensionLine } from "../../_components/figures/DimensionLine";
+import { UncertaintyBars } from "../../_components/figures/UncertaintyBars";
 import { VerdictBand } from "../../_components/figures/VerdictBand";
 import { Piece } from "./Piece";
 
@@ -24,7 +28,15 @@ const ROUND = VELOCITIES.flatMap((line, l) =>
   }),
 );
 
-export function FigurePieces() {
+const EXHAUST: AirflowInput = {
+  duct: { shape: "round", measured: "inside", diameter: { value: 14, unit: "in" } },
+  readings: { kind: "velocity", unit: "ft/min", lines: VELOCITIES },
+  layout: "log_linear",
+  working: true,
+};
+
+export function FigurePieces({ theme }: { theme: string }) {
+  const answer = airflow(EXHAUST);
   return (
     <>
       <Piece name="figures/CrossSection">
@@ -38,6 +50,15 @@ export function FigurePieces() {
           <VerdictBand measured={2380} design={2600} tolerancePercent={10} expandedUncertainty={118} unit="ft3/min" verdict="undecided" />
           <VerdictBand measured={1800} design={2600} tolerancePercent={10} expandedUncertainty={90} unit="ft3/min" verdict="outside" />
         </div>
+      </Piece>
+      <Piece name="figures/UncertaintyBars">
+        <UncertaintyBars {...answer.uncertainty} caption={`Uncertainty budget, ${theme}`} />
+      </Piece>
+      <Piece name="data/ChecksList">
+        <ChecksList checks={answer.checks} />
+      </Piece>
+      <Piece name="data/WorkingTable">
+        <WorkingTable steps={answer.working ?? []} maxHeight="16rem" caption={`Working, ${theme}`} />
       </Piece>
       <Piece name="figures/DimensionLine">
         <DimensionLine>24 in inside</DimensionLine>

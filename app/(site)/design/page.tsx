@@ -32,7 +32,7 @@ export default function DesignPage() {
             <ActionPieces theme={theme} />
             <FormPieces theme={theme} />
             <DataPieces theme={theme} />
-            <FigurePieces />
+            <FigurePieces theme={theme} />
             <ShellPieces />
           </div>
         ))}

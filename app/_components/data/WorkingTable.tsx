@@ -2,10 +2,18 @@ import type { WorkingStep } from "@/lib/airflow/working/working";
 import { formatQuantity } from "../format/number";
 import { Table } from "./Table";
 
+interface WorkingTableProps {
+  steps: WorkingStep[];
+  /** CSS length above which it scrolls within. */
+  maxHeight?: string;
+  /** Tells it from another on the same page. */
+  caption?: string;
+}
+
 /** The steps of a result, complete enough to be redone by hand. */
-export function WorkingTable({ steps, maxHeight }: { steps: WorkingStep[]; maxHeight?: string }) {
+export function WorkingTable({ steps, maxHeight, caption = "Working" }: WorkingTableProps) {
   return (
-    <Table caption="Working" hideCaption maxHeight={maxHeight}>
+    <Table caption={caption} hideCaption maxHeight={maxHeight}>
       <thead>
         <tr>
           <th scope="col">Step</th>

@@ -7,6 +7,8 @@ interface UncertaintyBarsProps {
   combinedPercent: number;
   coverageFactor: number;
   expandedPercent: number;
+  /** Tells it from another on the same page. */
+  caption?: string;
 }
 
 const NAMES: Record<InfluenceName, string> = {
@@ -20,11 +22,11 @@ const NAMES: Record<InfluenceName, string> = {
 };
 
 /** The uncertainty budget, row by row, each with a bar to the scale of the combined uncertainty. */
-export function UncertaintyBars({ budget, combinedPercent, coverageFactor, expandedPercent }: UncertaintyBarsProps) {
+export function UncertaintyBars({ budget, combinedPercent, coverageFactor, expandedPercent, caption = "Uncertainty budget" }: UncertaintyBarsProps) {
   const write = (percent: number) => `${formatNumber(percent, { decimals: 2 })} %`;
   const length = (percent: number) => `${combinedPercent > 0 ? (100 * percent) / combinedPercent : 0}%`;
   return (
-    <Table caption="Uncertainty budget" hideCaption>
+    <Table caption={caption} hideCaption>
       <thead>
         <tr>
           <th scope="col">Influence</th>
