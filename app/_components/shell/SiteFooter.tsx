@@ -8,7 +8,6 @@ const LINKS = [
   { href: "/docs/reference", label: "API reference" },
   { href: "/docs/cautions", label: "Cautions" },
   { href: "/docs/changelog", label: "Changelog" },
-  { href: "/.well-known/jwks.json", label: "Signing keys" },
 ];
 
 /** Foot of the public pages: the title block of the sheet. */

@@ -1,0 +1,21 @@
+import type { Metadata } from "next";
+import { PageHeader } from "@/app/_components/layout/PageHeader";
+import { SectionHead } from "@/app/_components/layout/SectionHead";
+
+export const metadata: Metadata = { title: "Changelog" };
+
+export default function ChangelogPage() {
+  return (
+    <>
+      <PageHeader title="Changelog">What changed for those who call the API. Within version 1 nothing that exists is taken away without notice.</PageHeader>
+      <div className="prose">
+        <SectionHead>1 December 2026, version 1.0.0</SectionHead>
+        <ul>
+          <li>Calculations: duct area, air density, density correction, average velocity, airflow, and batches of them.</li>
+          <li>Keys with scopes, environments, expiry, networks, rotation and revocation.</li>
+          <li>Usage by day, operation and status.</li>
+        </ul>
+      </div>
+    </>
+  );
+}
