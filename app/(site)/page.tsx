@@ -5,10 +5,9 @@ import { SectionHead } from "../_components/layout/SectionHead";
 
 const NOTES = [
   { head: "The working is in the answer.", text: "Equation, inputs, value and source of every step. A reviewer can redo it by hand." },
-  { head: "Slips are named.", text: "A digit misread, two digits swapped, a reading left out, outside dimensions used, pressures averaged: the answer says which one explains the figure." },
   { head: "How sure is part of the figure.", text: "An uncertainty budget by the GUM, and a verdict against design that says undecided when the measurement cannot tell." },
   { head: "The instrument decides the correction.", text: "Differential-pressure, thermal and vane instruments each get their own." },
-  { head: "A record outlives the app.", text: "An issued traverse is signed. Anyone can verify it later, offline, with the published keys." },
+  { head: "One definition.", text: "The schema that checks a request also makes the reference, the OpenAPI document and its examples." },
 ];
 
 export default function HomePage() {
@@ -18,7 +17,7 @@ export default function HomePage() {
         <h1 className="text-head font-semibold">Duct traverse readings in. Airflow out, with the working shown.</h1>
         <p className="mt-3">
           Averduct is an HTTP API for teams who write software for air balancing. Send the duct, the air and the readings. Get the airflow, how sure it is, and
-          what looks wrong. Keep the traverse as a record that anyone can check.
+          what looks wrong.
         </p>
         <div className="mt-4 flex flex-wrap gap-2">
           <LinkButton href="/sign-up" variant="primary">

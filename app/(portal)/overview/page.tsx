@@ -45,8 +45,8 @@ export default async function OverviewPage() {
       />
       <div className="grid gap-5">
         <StatRow>
-          <Stat label="Production, this month" value={formatNumber(burn.production)} unit="calculations" share={burn.production / plan.monthlyRequests} note={`${formatShare(burn.production / plan.monthlyRequests)} of the quota`} />
-          <Stat label="Sandbox, this month" value={formatNumber(burn.sandbox)} unit="calculations" share={burn.sandbox / plan.monthlyRequests} note={`${formatShare(burn.sandbox / plan.monthlyRequests)} of the quota`} />
+          <Stat label="Calculations in production, this month" value={formatNumber(burn.production)} share={burn.production / plan.monthlyRequests} note={`${formatShare(burn.production / plan.monthlyRequests)} of the quota`} />
+          <Stat label="Calculations in the sandbox, this month" value={formatNumber(burn.sandbox)} share={burn.sandbox / plan.monthlyRequests} note={`${formatShare(burn.sandbox / plan.monthlyRequests)} of the quota`} />
           <Stat
             label="Requests, last 21 days"
             value={formatNumber(requests)}

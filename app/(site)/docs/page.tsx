@@ -13,7 +13,7 @@ export default function DocsPage() {
   return (
     <>
       <PageHeader title="First call">From an account to the airflow of a traverse in five minutes.</PageHeader>
-      <div className="prose grid gap-8">
+      <div className="prose grid grid-cols-[minmax(0,1fr)] gap-8">
         <section>
           <SectionHead>1. Make a key</SectionHead>
           <p>

@@ -23,11 +23,11 @@ export function OperationIndex() {
         ))}
       </ul>
       <p className="mt-3 max-w-2xl">
-        Records, instruments, certificates and webhooks are in the{" "}
+        The{" "}
         <Link href="/docs/reference" className="link">
           API reference
-        </Link>
-        , each operation with an example that runs.
+        </Link>{" "}
+        has each operation with examples that run.
       </p>
     </section>
   );
