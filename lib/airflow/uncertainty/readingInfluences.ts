@@ -6,6 +6,10 @@ import type { BudgetInput, Influence } from "./budget";
 const RECTANGULAR = 1 / Math.sqrt(3);
 const DEFAULT_ACCURACY_PERCENT = 2;
 const DEFAULT_FLUCTUATION_PERCENT = 2;
+/** In Pa: no instrument tells a smaller pressure from nothing. */
+const LEAST_PRESSURE = 1e-6;
+/** In m/s, likewise. */
+const LEAST_VELOCITY = 1e-3;
 
 /**
  * Instrument accuracy, fully correlated over the points: a gain error moves all readings alike, an absolute error moves
@@ -40,10 +44,10 @@ function offsetSensitivity(readings: Readings, points: BudgetInput["traverse"]["
   const values = points.map(({ reading }) => reading);
   if (readings.kind === "velocity") {
     const mean = weightedMean(values, weights);
-    return mean > 0 ? 1 / mean : 0;
+    return mean > LEAST_VELOCITY ? 1 / mean : 0;
   }
-  // A reading of zero has no derivative; it is left out of the sum, as a shift there is one-sided.
-  const inverse = weightedMean(values.map((value) => (value > 0 ? 1 / Math.sqrt(value) : 0)), weights);
+  // A reading of nothing has no derivative; it is left out of the sum, as a shift there is one-sided.
+  const inverse = weightedMean(values.map((value) => (value > LEAST_PRESSURE ? 1 / Math.sqrt(value) : 0)), weights);
   const root = weightedMean(values.map(Math.sqrt), weights);
   return root > 0 ? inverse / (2 * root) : 0;
 }
