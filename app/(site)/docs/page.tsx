@@ -36,7 +36,7 @@ export default function DocsPage() {
           <p>
             A key belongs to one environment, <code>sandbox</code> or <code>production</code>, and has scopes. Send it as <code>Authorization: Bearer …</code>. To find keys that leaked into a repository or a log, search for:
           </p>
-          <pre className="overflow-x-auto"><code>{KEY_PATTERN.source}</code></pre>
+          <CodeBlock title="Regular expression" samples={[{ language: "text", code: KEY_PATTERN.source }]} />
         </section>
         <section>
           <SectionHead>Limits</SectionHead>
