@@ -1,0 +1,94 @@
+import type { Case } from "./case";
+import { methodSlips, readingSlips, singleSlips } from "./families";
+import type { Hypothesis } from "./hypothesis";
+import { identityOf, judgeOf, type Finding, type Judge } from "./judge";
+import { readingPairs } from "./readingPairs";
+import { NOTHING_CARRIED, reproduce } from "./reproduce";
+import { dimensionDigits } from "./slips/dimensionDigits";
+import { earlyRounding, otherEarlyRounding } from "./slips/earlyRounding";
+import type { Slip } from "./slip";
+import { rightWorksheet, type Worksheet } from "./worksheet";
+
+/** How far the report could be accounted for. */
+export type Conclusion = "agrees" | "explained" | "explained_by_two_slips" | "partly_explained" | "unexplained";
+
+export interface Explained {
+  conclusion: Conclusion;
+  /** Best first: all of what disagrees before part of it, fewer slips before more. */
+  findings: Finding[];
+  /** Whether so many pairs of slips fit that none of them tells anything. */
+  tooManyPairs: boolean;
+}
+
+/** So many pairs in one figure are told at the most; where more fit, two numbers can be found to explain anything. */
+const MOST_PAIRS = 20;
+
+/**
+ * Looks for the slips that explain a report, by as few assumptions as will do: none if rounding accounts for it, then one slip,
+ * one slip on top of early rounding, two slips, and last what explains only a part.
+ */
+export function explain(one: Case): Explained {
+  const right = rightWorksheet(one);
+  const exact = reproduce(one, right, NOTHING_CARRIED);
+  if (exact.every(({ reproduced }) => reproduced)) return { conclusion: "agrees", findings: [], tooManyPairs: false };
+  const judge = judgeOf(one, right);
+
+  const rounded = fewestSlips(earlyRounding(one, right).map((working) => judge(working, working.carried)).filter(isFull));
+  if (rounded.length > 0) return { conclusion: "explained", findings: distinct(rounded), tooManyPairs: false };
+
+  const singles = judged(judge, singleSlips(one, right));
+  const full = singles.filter(isFull);
+  if (full.length > 0) return { conclusion: "explained", findings: distinct(full), tooManyPairs: false };
+
+  const onRounding = otherEarlyRounding(one, right).flatMap((rounding) => judged(judge, onTopOf(rounding, singleSlips(one, rounding.sheet)))).filter(isFull);
+  if (onRounding.length > 0) return { conclusion: "explained", findings: distinct(onRounding), tooManyPairs: false };
+
+  const { pairs, tooMany } = pairsOfSlips(one, right, judge, distinct(singles));
+  if (pairs.length > 0) return { conclusion: "explained_by_two_slips", findings: pairs, tooManyPairs: false };
+  const partial = distinct(singles).sort((first, second) => second.explains.length - first.explains.length);
+  return { conclusion: partial.length > 0 ? "partly_explained" : "unexplained", findings: partial, tooManyPairs: tooMany };
+}
+
+const isFull = (finding: Finding | null): finding is Finding => finding?.full === true;
+
+const judged = (judge: Judge, hypotheses: readonly Hypothesis[]): Finding[] => hypotheses.map((hypothesis) => judge(hypothesis)).filter((finding) => finding !== null);
+
+const onTopOf = (first: Hypothesis, seconds: readonly Hypothesis[]): Hypothesis[] => seconds.map(({ slips, sheet }) => ({ slips: [...first.slips, ...slips], sheet }));
+
+/**
+ * Two slips that explain everything. Where one of them already explains a part by itself, it has evidence of its own, and
+ * only such pairs count; otherwise two slips in one figure are tried.
+ */
+function pairsOfSlips(one: Case, right: Worksheet, judge: Judge, singles: readonly Finding[]): { pairs: Finding[]; tooMany: boolean } {
+  const known = new Set(singles.map(identityOf));
+  const hasEvidence = ({ slips }: Hypothesis): boolean => slips.some((slip) => known.has(identityOf({ slips: [slip] })));
+  const onMethods = methodSlips(one, right).flatMap((first) => {
+    const [{ slip, figure }] = first.slips as [Slip];
+    const others = methodSlips(one, first.sheet).filter(({ slips: [other] }) => other!.slip !== slip || other!.figure !== figure);
+    return onTopOf(first, [...others, ...readingSlips(one, first.sheet)]);
+  });
+  // A dimension can be tried only once the average fits, so here the reading comes first.
+  const onReadings = singles.filter(({ slips: [slip] }) => slip!.at).slice(0, MOST_PAIRS).flatMap((first) => onTopOf(first, dimensionDigits(one, first.sheet)));
+  const found = judged(judge, [...onMethods, ...onReadings]).filter(isFull);
+  const pairs = distinct(found);
+  const withEvidence = pairs.filter(hasEvidence);
+  if (withEvidence.length > 0) return { pairs: withEvidence, tooMany: false };
+  const inOneFigure = pairs.length > 0 ? pairs : distinct(judged(judge, readingPairs(one, right, MOST_PAIRS)).filter(isFull));
+  return inOneFigure.length > MOST_PAIRS ? { pairs: [], tooMany: true } : { pairs: inOneFigure, tooMany: false };
+}
+
+/** Only the findings with the fewest slips. */
+function fewestSlips(findings: Finding[]): Finding[] {
+  const fewest = Math.min(...findings.map(({ slips }) => slips.length));
+  return findings.filter(({ slips }) => slips.length === fewest);
+}
+
+/** One finding for each set of slips: the first that explains most. */
+function distinct(findings: readonly Finding[]): Finding[] {
+  const best = new Map<string, Finding>();
+  for (const finding of findings) {
+    const known = best.get(identityOf(finding));
+    if (!known || finding.explains.length > known.explains.length) best.set(identityOf(finding), finding);
+  }
+  return [...best.values()];
+}

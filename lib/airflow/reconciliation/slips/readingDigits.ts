@@ -1,0 +1,37 @@
+import type { Case, CasePoint } from "../case";
+import { forEachDigitVariant, type DigitSlip } from "../digitVariants";
+import type { Hypothesis, SlipFamily } from "../hypothesis";
+import { neededReading, readingTarget } from "../readingTarget";
+import { velocityOn, withReading, type Worksheet } from "../worksheet";
+
+const WORDS: Record<DigitSlip, string> = {
+  digit_changed: "with one digit changed",
+  digits_swapped: "with two digits swapped",
+  digit_dropped: "with a digit dropped",
+  digit_added: "with a digit too many",
+  decimal_moved: "with the decimal point moved",
+};
+
+/** A reading used with a slip in its digits. For each reading the report leaves a narrow range; only slips that lead there are looked at. */
+export const readingDigits: SlipFamily = (one, sheet) => {
+  const target = readingTarget(one, sheet);
+  if (!target) return [];
+  const found: Hypothesis[] = [];
+  for (const point of one.points) {
+    const [low, high] = neededReading(one, sheet, target, point);
+    forEachDigitVariant(point.written, one.places, (slip, used) => {
+      const counted = one.effective(used);
+      if (counted >= low && counted <= high) found.push(digitHypothesis(one, sheet, point, slip, used));
+    });
+  }
+  return found;
+};
+
+export function digitHypothesis(one: Case, sheet: Worksheet, { line, point, written, reading, velocity, weight }: CasePoint, slip: DigitSlip, used: number): Hypothesis {
+  const counted = one.effective(used);
+  const changed = velocityOn(sheet, one.velocitiesOf([counted])[0]!) - velocityOn(sheet, velocity);
+  return {
+    slips: [{ slip, at: { line, point }, read: written, used, unit: one.readings.unit, detail: `Line ${line}, point ${point} reads ${written} and was used ${WORDS[slip]}, as ${used}.` }],
+    sheet: withReading(sheet, counted - reading, changed, weight),
+  };
+}
