@@ -24,3 +24,13 @@ export class AirflowInputError extends Error {
     this.faults = faults;
   }
 }
+
+/**
+ * Lets a value through that lies within its limits and refuses any other.
+ * @throws {AirflowInputError} With the fault that says where the value stands and what is taken.
+ * @example requireWithin(3, [0, 5], { path: ["probe"], code: "out_of_range", detail: "0 to 5 is taken." }) // 3
+ */
+export function requireWithin(value: number, [least, greatest]: readonly [number, number], fault: InputFault): number {
+  if (value >= least && value <= greatest) return value;
+  throw new AirflowInputError(fault);
+}

@@ -1,5 +1,6 @@
 import { resolveAir } from "../air/resolveAir";
 import { STANDARD_AIR_DENSITY } from "../air/standardAir";
+import { requireWithin } from "../errors";
 import type { Air, AnswerOptions, InstrumentPrinciple, StandardAirName } from "../types";
 import { inAnswerUnits, toSi } from "../units/convert";
 import { UNITS, type AirflowUnit, type Quantity, type QuantityOf, type VelocityUnit } from "../units/units";
@@ -25,9 +26,12 @@ export interface DensityCorrectionAnswer {
   working?: WorkingStep[];
 }
 
+/** In m/s or m³/s. */
+const INDICATION_LIMITS = [-1e6, 1e6] as const;
+
 /**
  * Corrects an indicated velocity or airflow from the air that the instrument assumed to the air that was there.
- * @throws {AirflowInputError} A state of air that cannot be.
+ * @throws {AirflowInputError} A state of air that cannot be, or an indication that no instrument gives.
  */
 export function densityCorrection(input: DensityCorrectionInput): DensityCorrectionAnswer {
   const options = resolveOptions(input);
@@ -36,7 +40,9 @@ export function densityCorrection(input: DensityCorrectionInput): DensityCorrect
   const to = densityOf(input.to, options, "to");
   const factor = indicationFactor(input.principle, from, to);
   const kind = input.quantity.unit in UNITS.velocity ? "velocity" : "airflow";
-  const indicated = toSi(kind, input.quantity as QuantityOf<typeof kind>);
+  const indicated = requireWithin(toSi(kind, input.quantity as QuantityOf<typeof kind>), INDICATION_LIMITS, {
+    path: ["quantity"], code: "quantity_out_of_range", detail: "At most 1,000,000 m/s or m³/s is taken. Check the unit.",
+  });
   const corrected = inAnswerUnits(kind, indicated * factor, system);
   const fromDensity = inAnswerUnits("density", from, system);
   const toDensity = inAnswerUnits("density", to, system);

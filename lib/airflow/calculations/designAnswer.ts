@@ -1,4 +1,4 @@
-import { AirflowInputError } from "../errors";
+import { requireWithin } from "../errors";
 import type { Design } from "../types";
 import type { Budget } from "../uncertainty/budget";
 import { verdict, type Verdict } from "../uncertainty/verdict";
@@ -19,16 +19,17 @@ export interface DesignAnswer {
 }
 
 const DEFAULT_TOLERANCE_PERCENT = 10;
+/** In m³/s. */
+const DESIGN_LIMITS = [1e-6, 1e6] as const;
 
 /**
  * Measured airflow against design, on the basis that the design names.
- * @throws {AirflowInputError} A design airflow that is not above 0.
+ * @throws {AirflowInputError} A design airflow that is not above 0, or that no duct carries.
  */
 export function designAnswer(design: Design, measured: { actual: number; standard: number }, budget: Budget, { system, working }: ResolvedOptions): DesignAnswer {
-  const target = toSi("airflow", design.airflow);
-  if (!(target > 0 && target <= 1e6)) {
-    throw new AirflowInputError({ path: ["design", "airflow"], code: "design_out_of_range", detail: "A design airflow is above 0 and at most 1,000,000 m³/s. Check the unit." });
-  }
+  const target = requireWithin(toSi("airflow", design.airflow), DESIGN_LIMITS, {
+    path: ["design", "airflow"], code: "design_out_of_range", detail: "A design airflow of 0.000001 to 1,000,000 m³/s is taken. Check the unit.",
+  });
   const basis = design.basis ?? "actual";
   const flow = measured[basis];
   const tolerancePercent = design.tolerancePercent ?? DEFAULT_TOLERANCE_PERCENT;

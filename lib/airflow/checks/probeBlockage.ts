@@ -1,8 +1,11 @@
-import { toSi } from "../units/convert";
 import type { InsideDuct } from "../duct/insideDuct";
+import { requireWithin } from "../errors";
+import { toSi } from "../units/convert";
 import type { CheckFunction } from "./context";
 
 const GREATEST_RATIO = 0.02;
+/** In m. */
+const DIAMETER_LIMITS = [0, 1] as const;
 
 const smallestDimension = (inside: InsideDuct): number => {
   switch (inside.shape) {
@@ -18,7 +21,10 @@ const smallestDimension = (inside: InsideDuct): number => {
 /** Whether the probe is thin enough not to change the flow it measures. */
 export const probeBlockage: CheckFunction = ({ inside, probe }) => {
   if (!inside || !probe?.diameter) return null;
-  const ratio = toSi("length", probe.diameter) / smallestDimension(inside);
+  const diameter = requireWithin(toSi("length", probe.diameter), DIAMETER_LIMITS, {
+    path: ["probe", "diameter"], code: "probe_diameter_out_of_range", detail: "A probe diameter of 0 to 1 m is taken. Check the unit.",
+  });
+  const ratio = diameter / smallestDimension(inside);
   const passed = ratio <= GREATEST_RATIO;
   return {
     code: "probe_blockage",

@@ -9,8 +9,9 @@ export type InsideDuct =
   | { shape: "round"; diameter: number }
   | { shape: "flat_oval"; major: number; minor: number };
 
-/** No duct that a probe is pushed through is wider; a larger figure is a slip in the unit or the decimal point. */
+/** In m. No duct that a probe is pushed through is wider or narrower inside; such a figure is a slip in the unit or the decimal point. */
 const LARGEST_DIMENSION = 100;
+const SMALLEST_DIMENSION = 0.001;
 
 /**
  * How far the duct's outside stands off its inside on each face: sheet or board, and lining.
@@ -25,10 +26,10 @@ export function wallThickness({ wall }: Duct): number {
 /**
  * The inside dimensions of a duct. Dimensions measured outside are reduced by twice the wall, sheet or board and lining,
  * on each axis; dimensions measured inside are taken as they are.
- * @param duct Each dimension above 0 and at most 100 m.
+ * @param duct Each dimension at most 100 m, and at least 1 mm inside.
  * @param path Where the duct stands in the caller's input.
  * @returns Inside dimensions in m.
- * @throws {AirflowInputError} A dimension is not above 0, outside or inside; a wall is negative; a flat oval's minor axis exceeds its major.
+ * @throws {AirflowInputError} A dimension is not above 0, outside or inside, or no duct has it; a wall is negative; a flat oval's minor axis exceeds its major.
  * @example insideDuct({ shape: "round", measured: "inside", diameter: { value: 500, unit: "mm" } }) // { shape: "round", diameter: 0.5 }
  */
 export function insideDuct(duct: Duct, path: Path = ["duct"]): InsideDuct {
@@ -77,5 +78,6 @@ function dimensionFault(name: string, given: Quantity<LengthUnit>, measured: num
   if (!(inside > 0)) {
     return { path, code: "inside_dimension_not_positive", detail: `The wall and lining leave nothing of the ${name} of ${written}. Check their thickness and unit.` };
   }
+  if (inside < SMALLEST_DIMENSION) return { path, code: "dimension_too_small", detail: `The ${name} of ${written} leaves less than ${1000 * SMALLEST_DIMENSION} mm inside, where no probe enters. Check the unit.` };
   return null;
 }

@@ -20,6 +20,8 @@ export interface ReadPoints {
 
 /** Beyond these no traverse is within the scope of ISO 3966 (Mach 0.25); a larger figure is a slip in the unit. */
 const GREATEST = { velocity_pressure: 5_000, velocity: 100 } as const;
+/** Weights further apart than this would leave nothing of the lighter points. */
+const WEIGHT_LIMITS = [1e-6, 1e6] as const;
 const GREATEST_WORDS = { velocity_pressure: "5 kPa (20 in wg)", velocity: "100 m/s (19,700 ft/min)" } as const;
 
 /**
@@ -79,7 +81,7 @@ function requireWeights({ lines, weights }: Readings): void {
   if (weights.length !== lines.length) refuse([], `There are ${lines.length} lines of readings and ${weights.length} of weights.`);
   for (const [line, row] of weights.entries()) {
     if (row.length !== lines[line]!.length) refuse([line], `Line ${line + 1} has ${lines[line]!.length} readings and ${row.length} weights.`);
-    const bad = row.findIndex((weight) => !(weight > 0 && weight <= 1e6));
-    if (bad >= 0) refuse([line, bad], "A weight is above 0 and at most a million.");
+    const bad = row.findIndex((weight) => !(weight >= WEIGHT_LIMITS[0] && weight <= WEIGHT_LIMITS[1]));
+    if (bad >= 0) refuse([line, bad], "A weight is above 0: a millionth to a million is taken.");
   }
 }

@@ -1,13 +1,16 @@
 import { area } from "../duct/area";
 import { hydraulicDiameter } from "../duct/hydraulicDiameter";
 import type { InsideDuct } from "../duct/insideDuct";
-import { DOWNSTREAM_DIAMETERS, UPSTREAM_DIAMETERS } from "../checks/siteDisturbance";
+import { DOWNSTREAM_DIAMETERS, straightLength, UPSTREAM_DIAMETERS } from "../checks/siteDisturbance";
+import { requireWithin } from "../errors";
 import type { LayoutRule } from "../types";
 import { toSi } from "../units/convert";
 import type { BudgetInput, Influence } from "./budget";
 
 /** Half-width of a dimension measured with a tape, 1/16 in. */
 const DIMENSION_HALF_WIDTH = toSi("length", { value: 1 / 16, unit: "in" });
+/** In m; a dimension less certain than this was not measured. */
+const HALF_WIDTH_LIMITS = [0, 1] as const;
 const LAYOUT_PERCENT: Record<LayoutRule, number> = { log_tchebycheff: 1, log_linear: 1, method_1: 1.5, equal_area: 1.5, custom: 2 };
 const UNNAMED_LAYOUT_PERCENT = 2;
 const SITE_PERCENT = { good: 0, unknown: 1, disturbed: 1.5 } as const;
@@ -35,7 +38,7 @@ export function siteRow({ site, inside, options }: BudgetInput): Influence {
   if (options.sitePercent !== undefined) return { name: "site", percent: options.sitePercent, origin: "given", detail: "Site, as given" };
   if (!site?.downstream || !site.upstream) return { name: "site", percent: SITE_PERCENT.unknown, origin: "default", detail: "Straight lengths not known" };
   const diameter = hydraulicDiameter(inside);
-  const good = toSi("length", site.downstream) >= DOWNSTREAM_DIAMETERS * diameter && toSi("length", site.upstream) >= UPSTREAM_DIAMETERS * diameter;
+  const good = straightLength("downstream", site.downstream) >= DOWNSTREAM_DIAMETERS * diameter && straightLength("upstream", site.upstream) >= UPSTREAM_DIAMETERS * diameter;
   return {
     name: "site",
     percent: good ? SITE_PERCENT.good : SITE_PERCENT.disturbed,
@@ -46,7 +49,9 @@ export function siteRow({ site, inside, options }: BudgetInput): Influence {
 
 /** Area: each dimension within its half-width, by the area's sensitivity to it. */
 export function areaRow({ inside, options }: BudgetInput): Influence {
-  const halfWidth = options.dimension ? toSi("length", options.dimension) : DIMENSION_HALF_WIDTH;
+  const halfWidth = requireWithin(options.dimension ? toSi("length", options.dimension) : DIMENSION_HALF_WIDTH, HALF_WIDTH_LIMITS, {
+    path: ["uncertainty", "dimension"], code: "uncertainty_out_of_range", detail: "A dimension's half-width of 0 to 1 m is taken. Check the unit.",
+  });
   const relative = Math.hypot(...relativeSensitivities(inside)) * halfWidth * RECTANGULAR;
   return {
     name: "area",

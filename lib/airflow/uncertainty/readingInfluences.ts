@@ -1,4 +1,5 @@
-import type { Readings } from "../types";
+import { AirflowInputError, requireWithin } from "../errors";
+import type { Instrument, Readings } from "../types";
 import { UNITS } from "../units/units";
 import { weightedMean } from "../velocity/mean";
 import type { BudgetInput, Influence } from "./budget";
@@ -6,6 +7,8 @@ import type { BudgetInput, Influence } from "./budget";
 const RECTANGULAR = 1 / Math.sqrt(3);
 const DEFAULT_ACCURACY_PERCENT = 2;
 const DEFAULT_FLUCTUATION_PERCENT = 2;
+/** In Pa or m/s. */
+const ABSOLUTE_LIMITS = [0, 5_000] as const;
 /** In Pa: no instrument tells a smaller pressure from nothing. */
 const LEAST_PRESSURE = 1e-6;
 /** In m/s, likewise. */
@@ -32,10 +35,16 @@ export function instrumentRow(input: BudgetInput): Influence {
 /** Relative effect of an absolute accuracy on the average, in percent, before the distribution is taken into account. */
 function absolutePart({ instrument, readings, traverse }: BudgetInput): number {
   const absolute = instrument?.accuracy?.absolute;
-  if (!absolute) return 0;
-  const units: Record<string, { factor: number }> = readings.kind === "velocity" ? UNITS.velocity : UNITS.pressure;
-  const size = absolute.value * (units[absolute.unit]?.factor ?? 0);
-  return 100 * size * offsetSensitivity(readings, traverse.points);
+  return absolute ? 100 * absoluteAccuracy(readings, absolute) * offsetSensitivity(readings, traverse.points) : 0;
+}
+
+/** An absolute accuracy in Pa or m/s, as the readings are. */
+function absoluteAccuracy({ kind, unit }: Readings, { value, unit: givenUnit }: NonNullable<NonNullable<Instrument["accuracy"]>["absolute"]>): number {
+  const path = ["instrument", "accuracy", "absolute"];
+  const units: Record<string, { factor: number }> = kind === "velocity" ? UNITS.velocity : UNITS.pressure;
+  const factor = units[givenUnit]?.factor;
+  if (factor === undefined) throw new AirflowInputError({ path, code: "accuracy_unit_differs", detail: `The readings are in ${unit}; their accuracy must be in a unit of the same quantity, not in ${givenUnit}.` });
+  return requireWithin(value * factor, ABSOLUTE_LIMITS, { path, code: "accuracy_out_of_range", detail: "An absolute accuracy of 0 to 5 kPa or 5,000 m/s is taken. Check the unit." });
 }
 
 /** Relative change of the average velocity for a common shift of all readings, per Pa or m/s. */
