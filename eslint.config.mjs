@@ -8,7 +8,7 @@ const forbid = (files, groups, message) => ({
 });
 
 export default tseslint.config(
-  { ignores: ["node_modules/", ".next*/", ".data/", "next-env.d.ts", "examples/"] },
+  { ignores: ["node_modules/", "**/.next*/", ".data/", "next-env.d.ts", "examples/"] },
   ...tseslint.configs.recommended,
   hooks.configs.flat["recommended-latest"],
   {

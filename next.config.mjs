@@ -20,7 +20,8 @@ export default {
   async headers() {
     return [
       {
-        source: "/(.*)",
+        // Pages only: the API sets what it needs itself, without Next.js matching its paths.
+        source: "/((?!api/).*)",
         headers: [
           { key: "X-Content-Type-Options", value: "nosniff" },
           { key: "Referrer-Policy", value: "strict-origin-when-cross-origin" },

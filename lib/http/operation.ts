@@ -2,7 +2,7 @@ import type { z } from "zod";
 import type { OperationDefinition } from "@/api-spec/define";
 import type { Key } from "@/lib/keys/keyDirectory";
 import { problemResponse } from "@/lib/problems/problem";
-import { admit, beginPassage, endPassage, toProblem, withHeaders } from "./passage";
+import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, toProblem, withHeaders } from "./passage";
 import { readJson } from "./requestBody";
 import { validate } from "./validation";
 
@@ -40,9 +40,9 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
       } as Call<z.output<Body>, z.output<Query>, z.output<Params>>;
       const answer = await run(call);
       const status = definition.status ?? 200;
-      const response = new Response(status === 204 ? null : JSON.stringify(answer), { status, headers: { "Content-Type": "application/json" } });
+      const response = status === 204 ? new Response(null, { status, headers: passageHeaders(passage) }) : jsonAnswer(answer, status, passage);
       endPassage(definition, passage, status, null);
-      return withHeaders(response, passage);
+      return response;
     } catch (error) {
       const problem = toProblem(error, passage.requestId);
       const response = problemResponse(problem, passage.requestId);

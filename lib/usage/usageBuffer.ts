@@ -28,7 +28,7 @@ interface Tally {
 const FLUSH_MS = 250;
 const MINUTE_MS = 60_000;
 /** Single requests kept for the Requests page out of each flush; what goes beyond is only counted. */
-const RECENT_PER_FLUSH = 100;
+const RECENT_PER_FLUSH = 20;
 const SEPARATOR = "|";
 
 /** Counts every request in memory and writes the sums to the database a few times a second. */

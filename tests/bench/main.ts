@@ -8,7 +8,7 @@ import { ensureBuild } from "@/lib/launch/build";
 import { ensureDebianProgram, MARIADB } from "@/lib/launch/debian";
 import { ROOT } from "@/lib/launch/packages.mjs";
 import { makeKey, makeOrganisation, testDatabase } from "../support/accounts";
-import { measure, type Target } from "./load";
+import { measure, requestsPerSecond, summary, type Round, type Target } from "./load";
 
 const BARE = path.join(ROOT, "tests/bench/bare");
 const PORTS = { bare: 4571, one: 4572, two: 4573 };
@@ -57,11 +57,11 @@ export async function main(): Promise<void> {
     const { text } = await makeKey({ organisationId });
     const airflow = (port: number): Target => ({ url: `http://127.0.0.1:${port}/api/v1/calculations/airflow`, headers: { authorization: `Bearer ${text}` }, body: BODY });
     const bareTarget: Target = { url: `http://127.0.0.1:${PORTS.bare}/echo`, body: BODY };
-    const figures = await measure({ bare: bareTarget, airflow: airflow(PORTS.one), second: airflow(PORTS.two) });
-    console.log("\nHTTP, one instance, 16 connections, 25 readings a request");
-    row("bare Next.js route handler: parse and echo", figures.bare!, figures.bare!);
-    row("airflow: key, limits, validation, engine, usage", figures.airflow!, figures.bare!);
-    row("the same on a second instance, one database", figures.second!, figures.bare!);
+    const rounds = await measure({ bare: bareTarget, airflow: airflow(PORTS.one), second: airflow(PORTS.two) });
+    console.log("\nHTTP, one instance, 16 connections, 25 readings a request; medians of 9 rounds in turns");
+    row("bare Next.js route handler: parse and echo", summary(rounds, "bare", "bare"));
+    row("airflow: key, limits, validation, engine, usage", summary(rounds, "airflow", "bare"));
+    row("the same on a second instance, one database", summary(rounds, "second", "bare"));
     await bothAtOnce(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
   } finally {
     bare.kill("SIGTERM");
@@ -73,16 +73,16 @@ export async function main(): Promise<void> {
 
 /** Two instances loaded at the same time share this machine's cores, so the bare handler is loaded twice as well. */
 async function bothAtOnce(bare: Target, one: Target, two: Target): Promise<void> {
-  const sum = async (targets: Target[]): Promise<number> => {
-    const figures = await Promise.all(targets.map((target) => measure({ target }, 2)));
-    return figures.reduce((total, { target }) => total + target!, 0);
+  const together = async (targets: Target[]): Promise<number> => {
+    const figures = await Promise.all(targets.map((target) => requestsPerSecond(target)));
+    return figures.reduce((sum, figure) => sum + figure, 0);
   };
-  const bareTogether = await sum([bare, bare]);
-  const together = await sum([one, two]);
-  console.log("\nHTTP, two loads at once");
-  row("bare handler, both loads on one instance", bareTogether, bareTogether);
-  row("airflow, two instances on one database, summed", together, bareTogether);
+  const rounds: Round[] = [];
+  for (let round = 0; round < 5; round += 1) rounds.push({ bare: await together([bare, bare]), both: await together([one, two]) });
+  console.log("\nHTTP, two loads at once; medians of 5 rounds in turns");
+  row("bare handler, both loads on one instance", summary(rounds, "bare", "bare"));
+  row("airflow, two instances on one database, summed", summary(rounds, "both", "bare"));
 }
 
-const row = (title: string, value: number, reference: number): void =>
-  console.log(`  ${title.padEnd(52)} ${value.toFixed(0).padStart(7)}/s   ${(value / reference).toFixed(2)}`);
+const row = (title: string, { perSecond, ratio }: { perSecond: number; ratio: number }): void =>
+  console.log(`  ${title.padEnd(52)} ${perSecond.toFixed(0).padStart(7)}/s   ${ratio.toFixed(2)}`);

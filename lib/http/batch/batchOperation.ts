@@ -2,7 +2,7 @@ import { batch } from "@/api-spec/calculations/batch";
 import { spendItems } from "@/lib/limits/planLimits";
 import { problemResponse } from "@/lib/problems/problem";
 import type { Handler } from "../operation";
-import { admit, beginPassage, endPassage, toProblem, withHeaders, type Passage } from "../passage";
+import { admit, beginPassage, endPassage, jsonAnswer, toProblem, withHeaders, type Passage } from "../passage";
 import { readJson } from "../requestBody";
 import { validate } from "../validation";
 import { runItem } from "./runItem";
@@ -18,7 +18,7 @@ export const batchOperation: Handler = async (request) => {
     if (NDJSON.test(request.headers.get("content-type") ?? "")) return streamedBatch(request, passage);
     const response = await wholeBatch(request, passage);
     endPassage(batch, passage, response.status, null);
-    return withHeaders(response, passage);
+    return response;
   } catch (error) {
     const problem = toProblem(error, passage.requestId);
     const response = problemResponse(problem, passage.requestId);
@@ -33,5 +33,5 @@ async function wholeBatch(request: Request, passage: Passage): Promise<Response>
   if (items.length > 1) await spendItems(passage.key!, items.length - 1, passage.startedAt);
   passage.items = items.length;
   const results = items.map((item, index) => runItem(item, index, passage.requestId, `/items/${index}`));
-  return new Response(JSON.stringify({ items: results }), { headers: { "Content-Type": "application/json" } });
+  return jsonAnswer({ items: results }, 200, passage);
 }
