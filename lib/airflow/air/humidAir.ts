@@ -3,6 +3,8 @@ import psychrolib from "psychrolib";
 psychrolib.SetUnitSystem(psychrolib.SI);
 
 const ZERO_CELSIUS = 273.15;
+/** R_da as psychrolib has it, in J/(kg K). */
+export const DRY_AIR_GAS_CONSTANT = 287.042;
 
 /**
  * Humidity ratio from relative humidity.

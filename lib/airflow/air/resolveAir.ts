@@ -16,8 +16,8 @@ export interface ResolvedAir {
   absolutePressure: number | null;
   /** kg/kg; null where only the density is known. */
   humidityRatio: number | null;
-  /** K; null where only the density is known. */
-  dryBulb: number | null;
+  /** What it was resolved from; null where only the density is known, or where nothing is. */
+  state: AirState | null;
   assumed: Assumption[];
 }
 
@@ -34,9 +34,9 @@ const GREATEST_DENSITY = 2.5;
  * @throws {AirflowInputError} Outside the range, or a state that cannot be; names the field.
  */
 export function resolveAir(air: Air | undefined, standardDensity: number, path: Path = ["air"]): ResolvedAir {
-  if (!air) return { density: standardDensity, absolutePressure: null, humidityRatio: null, dryBulb: null, assumed: ["standard_air"] };
+  if (!air) return { density: standardDensity, absolutePressure: null, humidityRatio: null, state: null, assumed: ["standard_air"] };
   if ("density" in air) {
-    return { density: knownDensity(toSi("density", air.density), [...path, "density"]), absolutePressure: null, humidityRatio: null, dryBulb: null, assumed: [] };
+    return { density: knownDensity(toSi("density", air.density), [...path, "density"]), absolutePressure: null, humidityRatio: null, state: null, assumed: [] };
   }
   return resolveState(air, path);
 }
@@ -52,7 +52,7 @@ function resolveState(air: AirState, path: Path): ResolvedAir {
     density: humidAirDensity(dryBulb, humidity.ratio, pressure.absolute),
     absolutePressure: pressure.absolute,
     humidityRatio: humidity.ratio,
-    dryBulb,
+    state: air,
     assumed: [...(humidity.assumedDry ? (["dry_air"] as const) : []), ...(pressure.assumedSeaLevel ? (["sea_level"] as const) : [])],
   };
 }

@@ -1,13 +1,13 @@
 import { AirflowInputError } from "../errors";
 import type { ResolvedAir } from "../air/resolveAir";
 import { knownDensity } from "../air/resolveAir";
+import { STANDARD_ATMOSPHERE } from "../air/standardAtmosphere";
 import type { ReadPoint } from "../readings/readPoints";
 import type { Instrument, Probe, Readings } from "../types";
 import { toSi } from "../units/convert";
 import { indicationFactor } from "./indicatedVelocity";
-import { COMPRESSIBILITY_THRESHOLD, compressibilityFactor, velocityFromPressure } from "./velocityFromPressure";
+import { appliedCompressibility, compressibilityFactor, velocityFromPressure } from "./velocityFromPressure";
 
-const SEA_LEVEL_PRESSURE = 101_325;
 const LEAST_COEFFICIENT = 0.5;
 const GREATEST_COEFFICIENT = 1.5;
 
@@ -16,6 +16,8 @@ export interface PointVelocities {
   velocities: number[];
   /** What the readings were multiplied by for density; null for velocity pressures. */
   indicationFactor: number | null;
+  /** The density in kg/m³ that the instrument assumed; null for velocity pressures, and where no instrument is described. */
+  assumedDensity: number | null;
   /** The smallest compressibility factor found, applied or not; null for velocity readings. */
   leastCompressibility: number | null;
 }
@@ -27,26 +29,26 @@ export interface PointVelocities {
  */
 export function pointVelocities(readings: Readings, points: ReadPoint[], air: ResolvedAir, probe: Probe | undefined, instrument: Instrument | undefined, standardDensity: number): PointVelocities {
   if (readings.kind === "velocity") {
-    const factor = velocityFactor(instrument, air.density, standardDensity);
-    return { velocities: points.map(({ reading }) => reading * factor), indicationFactor: factor, leastCompressibility: null };
+    const assumed = instrument ? assumedDensity(instrument, standardDensity) : null;
+    const factor = instrument && assumed !== null ? indicationFactor(instrument.principle, assumed, air.density) : 1;
+    return { velocities: points.map(({ reading }) => reading * factor), indicationFactor: factor, assumedDensity: assumed, leastCompressibility: null };
   }
   const coefficient = probeCoefficient(probe);
-  const pressure = air.absolutePressure ?? SEA_LEVEL_PRESSURE;
-  let least = 1;
-  const velocities = points.map(({ reading }) => {
-    const velocity = velocityFromPressure(reading, air.density, coefficient);
-    const compressibility = compressibilityFactor(reading, pressure);
-    least = Math.min(least, compressibility);
-    return 1 - compressibility > COMPRESSIBILITY_THRESHOLD ? velocity * compressibility : velocity;
-  });
-  return { velocities, indicationFactor: null, leastCompressibility: least };
+  const greatest = points.reduce((most, { reading }) => Math.max(most, reading), 0);
+  return {
+    velocities: points.map(({ reading }) => velocityOfPressure(reading, air, coefficient)),
+    indicationFactor: null,
+    assumedDensity: null,
+    leastCompressibility: compressibilityFactor(greatest, staticPressure(air)),
+  };
 }
 
-/** The factor on indicated velocities; 1 where no instrument is described. */
-function velocityFactor(instrument: Instrument | undefined, density: number, standardDensity: number): number {
-  if (!instrument) return 1;
-  return indicationFactor(instrument.principle, assumedDensity(instrument, standardDensity), density);
-}
+/** Velocity in m/s from a velocity pressure in Pa, corrected for compressibility where that counts. */
+export const velocityOfPressure = (velocityPressure: number, air: ResolvedAir, coefficient: number): number =>
+  velocityFromPressure(velocityPressure, air.density, coefficient) * appliedCompressibility(velocityPressure, staticPressure(air));
+
+/** Absolute pressure in Pa that compressibility is judged by; sea level where only the density of the air is known. */
+export const staticPressure = ({ absolutePressure }: ResolvedAir): number => absolutePressure ?? STANDARD_ATMOSPHERE.seaLevelPressure;
 
 /** The density in kg/m³ that an instrument assumed; standard air where it does not say. */
 export const assumedDensity = (instrument: Instrument, standardDensity: number): number =>

@@ -2,13 +2,13 @@ import type { ResolvedAir } from "../air/resolveAir";
 import { readPoints, type ReadPoint } from "../readings/readPoints";
 import type { Instrument, NegativeReadings, Probe, Readings } from "../types";
 import { weightedMean } from "./mean";
-import { pointVelocities, probeCoefficient, type PointVelocities } from "./pointVelocities";
-import { velocityFromPressure } from "./velocityFromPressure";
+import { pointVelocities, probeCoefficient, velocityOfPressure, type PointVelocities } from "./pointVelocities";
 
 /** The velocities of a traverse, in SI. */
 export interface TraverseVelocity extends PointVelocities {
   points: ReadPoint[];
   skipped: number;
+  instrument: Instrument | undefined;
   /** m/s. */
   average: number;
   /** What the velocity of the mean velocity pressure would have been, in m/s; null for velocity readings. */
@@ -30,7 +30,7 @@ export function traverseVelocity(
   const weights = points.map(({ weight }) => weight);
   const fromAveragePressure =
     readings.kind === "velocity_pressure"
-      ? velocityFromPressure(weightedMean(points.map(({ reading }) => reading), weights), air.density, probeCoefficient(probe))
+      ? velocityOfPressure(weightedMean(points.map(({ reading }) => reading), weights), air, probeCoefficient(probe))
       : null;
-  return { ...found, points, skipped, average: weightedMean(found.velocities, weights), fromAveragePressure };
+  return { ...found, points, skipped, instrument, average: weightedMean(found.velocities, weights), fromAveragePressure };
 }

@@ -1,5 +1,5 @@
 /** Ratio of specific heats of air. */
-const KAPPA = 1.4;
+export const KAPPA = 1.4;
 /** The correction is applied where it exceeds this. */
 export const COMPRESSIBILITY_THRESHOLD = 0.0005;
 
@@ -16,11 +16,25 @@ export const velocityFromPressure = (velocityPressure: number, density: number, 
 
 /**
  * Compressibility factor (1 − ε) of a pitot-static reading, √(1 − r / 2κ + (κ − 1) r² / 6κ²), where r = p_v / p.
- * @param velocityPressure In Pa, 0 or more. @param absolutePressure Static, absolute, in Pa.
+ * @param velocityPressure In Pa, 0 or more.
+ * @param absolutePressure Static, absolute, in Pa.
  * @returns Factor on the velocity, at most 1.
+ * @example compressibilityFactor(0, 101325) // 1
  * @see ISO 3966, correction for compressibility (form from memory); within 1e-5 of the isentropic equation at 40 m/s.
  */
 export function compressibilityFactor(velocityPressure: number, absolutePressure: number): number {
   const ratio = velocityPressure / absolutePressure;
   return Math.sqrt(1 - ratio / (2 * KAPPA) + ((KAPPA - 1) / (6 * KAPPA ** 2)) * ratio ** 2);
+}
+
+/**
+ * The compressibility factor that a reading is corrected by: 1 where the correction would not exceed 0.05 %.
+ * @param velocityPressure In Pa, 0 or more.
+ * @param absolutePressure Static, absolute, in Pa.
+ * @returns Factor on the velocity, at most 1.
+ * @example appliedCompressibility(60, 101325) // 1
+ */
+export function appliedCompressibility(velocityPressure: number, absolutePressure: number): number {
+  const factor = compressibilityFactor(velocityPressure, absolutePressure);
+  return 1 - factor > COMPRESSIBILITY_THRESHOLD ? factor : 1;
 }
