@@ -4,7 +4,7 @@ import { runChecks } from "../checks/runChecks";
 import { area } from "../duct/area";
 import { insideDuct } from "../duct/insideDuct";
 import type { Air, AnswerOptions, Design, Duct, Instrument, LayoutRule, NegativeReadings, Probe, Readings, Site, StandardAirName, UncertaintyOptions } from "../types";
-import { uncertaintyBudget } from "../uncertainty/budget";
+import { uncertaintyBudget, type Budget } from "../uncertainty/budget";
 import { inAnswerUnits } from "../units/convert";
 import type { QuantityOf } from "../units/units";
 import { traverseVelocity } from "../velocity/traverseVelocity";
@@ -13,7 +13,7 @@ import { addAirWorking, airAnswer, ratio, type AirAnswer } from "./airAnswer";
 import { designAnswer, type DesignAnswer } from "./designAnswer";
 import { addDuctWorking } from "./ductArea";
 import { resolveOptions, workingPart, type ResolvedOptions } from "./options";
-import { uncertaintyAnswer, type UncertaintyAnswer } from "./uncertaintyAnswer";
+import { addUncertaintyWorking, uncertaintyAnswer, type UncertaintyAnswer } from "./uncertaintyAnswer";
 import { addVelocityWorking, velocityAnswer, type VelocityAnswer } from "./velocityAnswer";
 
 export interface AirflowInput extends AnswerOptions {
@@ -62,14 +62,17 @@ export function airflow(input: AirflowInput): AirflowAnswer {
   const ductArea = area(inside);
   const actual = ductArea * traverse.average;
   const flow: Flow = { area: ductArea, averageVelocity: traverse.average, actual, mass: air.density * actual, standard: (air.density * actual) / standardDensity };
-  const budget = uncertaintyBudget({
-    readings, traverse, air, inside, instrument, site, layout, airWasGiven: input.air !== undefined, minimumPoints: null, options: input.uncertainty ?? {},
-  });
+  const budgetOf = (basis: "actual" | "standard"): Budget =>
+    uncertaintyBudget({ readings, traverse, air, inside, instrument, site, layout, airWasGiven: input.air !== undefined, basis, minimumPoints: null, options: input.uncertainty ?? {} });
+  const budget = budgetOf("actual");
+  const designBudget = input.design?.basis === "standard" ? budgetOf("standard") : budget;
   if (working) {
     addDuctWorking(working, input.duct, inside, system);
     addAirWorking(working, air, options);
     addVelocityWorking(working, readings, traverse, air, probe, system);
     addFlowWorking(flow, air.density, options);
+    addUncertaintyWorking(working, budget, "actual");
+    if (designBudget !== budget) addUncertaintyWorking(working, designBudget, "standard");
   }
   return {
     airflow: {
@@ -82,7 +85,7 @@ export function airflow(input: AirflowInput): AirflowAnswer {
     air: airAnswer(air, options),
     checks: runChecks({ readings, traverse, air, system, instrument, probe, inside, site, layout }),
     uncertainty: uncertaintyAnswer(budget, flow.actual, system),
-    design: input.design ? designAnswer(input.design, flow, budget, options) : null,
+    design: input.design ? designAnswer(input.design, flow, designBudget, options) : null,
     ...workingPart(working),
   };
 }

@@ -6,7 +6,6 @@ import { inAnswerUnits, toSi } from "../units/convert";
 import { UNITS, type AirflowUnit, type Quantity, type QuantityOf, type VelocityUnit } from "../units/units";
 import { INDICATION_EQUATION, indicationFactor } from "../velocity/indicatedVelocity";
 import type { WorkingStep } from "../working/working";
-import { ratio } from "./airAnswer";
 import { resolveOptions, workingPart, type ResolvedOptions } from "./options";
 
 export interface DensityCorrectionInput extends AnswerOptions {
@@ -46,10 +45,11 @@ export function densityCorrection(input: DensityCorrectionInput): DensityCorrect
   const corrected = inAnswerUnits(kind, indicated * factor, system);
   const fromDensity = inAnswerUnits("density", from, system);
   const toDensity = inAnswerUnits("density", to, system);
+  const symbol = kind === "velocity" ? "V" : "Q";
   working?.add({
     step: "Density correction",
-    equation: INDICATION_EQUATION[input.principle],
-    inputs: { V_ind: inAnswerUnits(kind, indicated, system), "ρ₀": fromDensity, ρ: toDensity, factor: ratio(factor) },
+    equation: INDICATION_EQUATION[input.principle].replaceAll("V", symbol),
+    inputs: { [`${symbol}_ind`]: inAnswerUnits(kind, indicated, system), "ρ₀": fromDensity, ρ: toDensity },
     value: corrected,
     source: "Bernoulli's equation for differential pressure, mass flux for a thermal instrument",
   });

@@ -3,8 +3,8 @@ import type { Design } from "../types";
 import type { Budget } from "../uncertainty/budget";
 import { verdict, type Verdict } from "../uncertainty/verdict";
 import { inAnswerUnits, toSi } from "../units/convert";
-import type { QuantityOf } from "../units/units";
-import { ratio } from "./airAnswer";
+import type { QuantityOf, UnitSystem } from "../units/units";
+import type { Working } from "../working/working";
 import type { ResolvedOptions } from "./options";
 
 export interface DesignAnswer {
@@ -36,14 +36,8 @@ export function designAnswer(design: Design, measured: { actual: number; standar
   const expanded = (flow * budget.expandedPercent) / 100;
   const percent = (100 * flow) / target;
   const airflow = (cubicMetresPerSecond: number): QuantityOf<"airflow"> => inAnswerUnits("airflow", cubicMetresPerSecond, system);
-  working?.add({ step: "Percent of design", equation: "100 Q / Q_d", inputs: { Q: airflow(flow), Q_d: airflow(target) }, value: { value: percent, unit: "percent" }, source: "Definition" });
-  working?.add({
-    step: "Verdict",
-    equation: "within: |Q − Q_d| + U ≤ T; outside: |Q − Q_d| − U > T",
-    inputs: { "|Q − Q_d|": airflow(Math.abs(flow - target)), U: airflow(expanded), T: airflow((target * tolerancePercent) / 100) },
-    value: ratio(percent / 100),
-    source: "JCGM 106, guard band of U",
-  });
+  const tolerance = (target * tolerancePercent) / 100;
+  if (working) addDesignWorking(working, { flow, target, tolerancePercent, expandedPercent: budget.expandedPercent }, system);
   return {
     airflow: airflow(target),
     basis,
@@ -51,6 +45,25 @@ export function designAnswer(design: Design, measured: { actual: number; standar
     difference: airflow(flow - target),
     tolerancePercent,
     expandedUncertainty: airflow(expanded),
-    verdict: verdict(flow, target, expanded, (target * tolerancePercent) / 100),
+    verdict: verdict(flow, target, expanded, tolerance),
   };
+}
+
+interface Comparison {
+  flow: number;
+  target: number;
+  tolerancePercent: number;
+  expandedPercent: number;
+}
+
+function addDesignWorking(working: Working, { flow, target, tolerancePercent, expandedPercent }: Comparison, system: UnitSystem): void {
+  const airflow = (cubicMetresPerSecond: number): QuantityOf<"airflow"> => inAnswerUnits("airflow", cubicMetresPerSecond, system);
+  const percent = (value: number): QuantityOf<"ratio"> => ({ value, unit: "percent" });
+  const [Q, Q_d, U] = [airflow(flow), airflow(target), percent(expandedPercent)];
+  const difference = Math.abs(flow - target);
+  const uncertainty = (flow * expandedPercent) / 100;
+  working.add({ step: "Percent of design", equation: "100 Q / Q_d", inputs: { Q, Q_d }, value: percent((100 * flow) / target), source: "Definition" });
+  working.add({ step: "Tolerance", equation: "T = Q_d × tolerance", inputs: { Q_d, tolerance: percent(tolerancePercent) }, value: airflow((target * tolerancePercent) / 100), source: "The design's tolerance" });
+  working.add({ step: "Difference with the uncertainty added", equation: "|Q − Q_d| + U Q", inputs: { Q, Q_d, U }, value: airflow(difference + uncertainty), source: "JCGM 106, guard band of U: within where this is at most T" });
+  working.add({ step: "Difference with the uncertainty taken off", equation: "|Q − Q_d| − U Q", inputs: { Q, Q_d, U }, value: airflow(difference - uncertainty), source: "JCGM 106, guard band of U: outside where this exceeds T, otherwise undecided" });
 }

@@ -1,6 +1,8 @@
 import type { Budget, Influence } from "../uncertainty/budget";
 import { inAnswerUnits } from "../units/convert";
 import type { QuantityOf, UnitSystem } from "../units/units";
+import type { Working } from "../working/working";
+import { ratio } from "./airAnswer";
 
 export interface UncertaintyAnswer {
   budget: Influence[];
@@ -22,3 +24,22 @@ export const uncertaintyAnswer = (budget: Budget, actual: number, system: UnitSy
   expanded: inAnswerUnits("airflow", (actual * budget.expandedPercent) / 100, system),
   note: NOTE,
 });
+
+/** The steps from the rows of a budget to the expanded uncertainty. */
+export function addUncertaintyWorking(working: Working, { influences, combinedPercent, coverageFactor, expandedPercent }: Budget, basis: string): void {
+  const percent = (value: number): QuantityOf<"ratio"> => ({ value, unit: "percent" });
+  working.add({
+    step: `Combined uncertainty of the ${basis} airflow`,
+    equation: "u = √(Σ u_i²)",
+    inputs: Object.fromEntries(influences.map((influence) => [`u_${influence.name}`, percent(influence.percent)])),
+    value: percent(combinedPercent),
+    source: "GUM, ISO/IEC Guide 98-3, 5.1: relative standard uncertainties of independent influences",
+  });
+  working.add({
+    step: `Expanded uncertainty of the ${basis} airflow`,
+    equation: "U = k u",
+    inputs: { k: ratio(coverageFactor), u: percent(combinedPercent) },
+    value: percent(expandedPercent),
+    source: "GUM, ISO/IEC Guide 98-3, 6.2: k = 2, about 95 %",
+  });
+}

@@ -1,7 +1,7 @@
 import type { Assumption } from "../air/resolveAir";
 import { humidAirDensity, saturationHumidityRatio } from "../air/humidAir";
 import { standardAtmospherePressure } from "../air/standardAtmosphere";
-import type { Instrument, Readings } from "../types";
+import { densityExponent } from "../velocity/densityExponent";
 import type { CheckFunction } from "./context";
 
 const WORDS: Record<Assumption, string> = {
@@ -20,16 +20,10 @@ const HUMID_RATIO =
   humidAirDensity(EIGHTY_FAHRENHEIT, 0, standardAtmospherePressure(0));
 const DENSITY_RATIO: Record<Assumption, number> = { standard_air: ALTITUDE_RATIO, dry_air: HUMID_RATIO, sea_level: ALTITUDE_RATIO };
 
-/** The power of density that velocity goes with: a pressure gives V ∝ ρ^−½, a thermal reading V ∝ ρ^−1. */
-function exponentOf(readings: Readings, instrument: Instrument | undefined): number {
-  if (readings.kind === "velocity_pressure" || instrument?.principle === "differential_pressure") return -0.5;
-  return instrument?.principle === "thermal" ? -1 : 0;
-}
-
 /** What was taken for granted about the air, and how far the figure could move for it. */
 export const densityAssumed: CheckFunction = ({ air: { assumed }, readings, instrument }) => {
   const untold = readings.kind === "velocity" && !instrument;
-  const exponent = exponentOf(readings, instrument);
+  const exponent = densityExponent(readings, instrument);
   // Where the velocity does not depend on density, the mass still does.
   const [moves, power] = exponent === 0 ? ["standard and mass airflow", 1] : ["average velocity", exponent];
   const couldMove = Math.max(0, ...assumed.map((one) => 100 * Math.abs(DENSITY_RATIO[one] ** power - 1)));

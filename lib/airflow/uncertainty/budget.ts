@@ -21,6 +21,8 @@ export interface BudgetInput {
   traverse: TraverseVelocity;
   air: ResolvedAir;
   airWasGiven: boolean;
+  /** Which airflow the budget is of; they differ in what density does to them. */
+  basis: "actual" | "standard";
   inside: InsideDuct;
   instrument?: Instrument;
   site?: Site;
@@ -48,6 +50,6 @@ const COVERAGE_FACTOR = 2;
  */
 export function uncertaintyBudget(input: BudgetInput): Budget {
   const influences = [instrumentRow(input), fluctuationRow(input), layoutRow(input), siteRow(input), areaRow(input), densityRow(input), roundingRow(input)];
-  const combinedPercent = Math.sqrt(influences.reduce((sum, { percent }) => sum + percent ** 2, 0));
+  const combinedPercent = Math.hypot(...influences.map(({ percent }) => percent));
   return { influences, combinedPercent, coverageFactor: COVERAGE_FACTOR, expandedPercent: COVERAGE_FACTOR * combinedPercent };
 }

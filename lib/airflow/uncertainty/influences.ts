@@ -5,7 +5,9 @@ import { DOWNSTREAM_DIAMETERS, straightLength, UPSTREAM_DIAMETERS } from "../che
 import { requireWithin } from "../errors";
 import type { LayoutRule } from "../types";
 import { toSi } from "../units/convert";
+import { densityExponent } from "../velocity/densityExponent";
 import type { BudgetInput, Influence } from "./budget";
+import { RECTANGULAR } from "./rectangular";
 
 /** Half-width of a dimension measured with a tape, 1/16 in. */
 const DIMENSION_HALF_WIDTH = toSi("length", { value: 1 / 16, unit: "in" });
@@ -15,9 +17,6 @@ const LAYOUT_PERCENT: Record<LayoutRule, number> = { log_tchebycheff: 1, log_lin
 const UNNAMED_LAYOUT_PERCENT = 2;
 const SITE_PERCENT = { good: 0, unknown: 1, disturbed: 1.5 } as const;
 const DENSITY_PERCENT = 0.5;
-
-/** Standard uncertainty of a rectangular distribution of half-width a is a / √3. @see GUM, 4.3.7. */
-const RECTANGULAR = 1 / Math.sqrt(3);
 
 /** Layout and count: how well the points stand for the whole cross-section; more when there are too few. */
 export function layoutRow({ layout, minimumPoints, traverse, options }: BudgetInput): Influence {
@@ -76,10 +75,13 @@ function relativeSensitivities(inside: InsideDuct): number[] {
   }
 }
 
-/** Density: 1/2 of its relative uncertainty where velocity follows from pressure, all of it for a thermal instrument, none for a vane. */
-export function densityRow({ readings, instrument, options, airWasGiven }: BudgetInput): Influence {
+/**
+ * Density, by the power of it that the airflow goes with. From a pressure: half of its relative uncertainty, of actual and of
+ * standard airflow. From a thermal instrument: all of it in the actual airflow, none in the standard. From a vane: the reverse.
+ */
+export function densityRow({ readings, instrument, basis, options, airWasGiven }: BudgetInput): Influence {
   const percent = options.densityPercent ?? DENSITY_PERCENT;
-  const sensitivity = readings.kind === "velocity_pressure" || instrument?.principle === "differential_pressure" ? 0.5 : instrument?.principle === "thermal" ? 1 : 0;
+  const sensitivity = Math.abs(densityExponent(readings, instrument) + (basis === "standard" ? 1 : 0));
   return {
     name: "density",
     percent: percent * sensitivity,

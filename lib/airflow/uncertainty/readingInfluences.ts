@@ -3,16 +3,14 @@ import type { Instrument, Readings } from "../types";
 import { UNITS } from "../units/units";
 import { weightedMean } from "../velocity/mean";
 import type { BudgetInput, Influence } from "./budget";
+import { RECTANGULAR } from "./rectangular";
 
-const RECTANGULAR = 1 / Math.sqrt(3);
 const DEFAULT_ACCURACY_PERCENT = 2;
 const DEFAULT_FLUCTUATION_PERCENT = 2;
 /** In Pa or m/s. */
 const ABSOLUTE_LIMITS = [0, 5_000] as const;
-/** In Pa: no instrument tells a smaller pressure from nothing. */
-const LEAST_PRESSURE = 1e-6;
-/** In m/s, likewise. */
-const LEAST_VELOCITY = 1e-3;
+/** Mean of the readings in m/s, or of their roots in √Pa, that keeps a quotient finite where nothing moves; no instrument tells it from 0. */
+const LEAST_MEAN = 1e-3;
 
 /**
  * Instrument accuracy, fully correlated over the points: a gain error moves all readings alike, an absolute error moves
@@ -35,7 +33,7 @@ export function instrumentRow(input: BudgetInput): Influence {
 /** Relative effect of an absolute accuracy on the average, in percent, before the distribution is taken into account. */
 function absolutePart({ instrument, readings, traverse }: BudgetInput): number {
   const absolute = instrument?.accuracy?.absolute;
-  return absolute ? 100 * absoluteAccuracy(readings, absolute) * offsetSensitivity(readings, traverse.points) : 0;
+  return absolute ? 100 * errorsOf(absoluteAccuracy(readings, absolute), readings, traverse.points).common : 0;
 }
 
 /** An absolute accuracy in Pa or m/s, as the readings are. */
@@ -47,29 +45,38 @@ function absoluteAccuracy({ kind, unit }: Readings, { value, unit: givenUnit }: 
   return requireWithin(value * factor, ABSOLUTE_LIMITS, { path, code: "accuracy_out_of_range", detail: "An absolute accuracy of 0 to 5 kPa or 5,000 m/s is taken. Check the unit." });
 }
 
-/** Relative change of the average velocity for a common shift of all readings, per Pa or m/s. */
-function offsetSensitivity(readings: Readings, points: BudgetInput["traverse"]["points"]): number {
-  const weights = points.map(({ weight }) => weight);
-  const values = points.map(({ reading }) => reading);
-  if (readings.kind === "velocity") {
-    const mean = weightedMean(values, weights);
-    return mean > LEAST_VELOCITY ? 1 / mean : 0;
+type Points = BudgetInput["traverse"]["points"];
+
+/**
+ * Relative error of the average velocity where each reading may be off by a size in Pa or m/s: by the same error at all
+ * points, or by an independent one at each. To first order: V ∝ x for velocities, V ∝ √p for pressures.
+ * A pressure below a quarter of the size counts as that quarter: there the first order gives √size, which is all that the error can add to √0.
+ */
+function errorsOf(size: number, { kind }: Readings, points: Points): { common: number; independent: number } {
+  let sum = 0;
+  let squares = 0;
+  for (const { reading, weight } of points) {
+    const change = weight * (kind === "velocity" || size === 0 ? size : size / (2 * Math.sqrt(Math.max(reading, size / 4))));
+    sum += change;
+    squares += change ** 2;
   }
-  // A reading of nothing has no derivative; it is left out of the sum, as a shift there is one-sided.
-  const inverse = weightedMean(values.map((value) => (value > LEAST_PRESSURE ? 1 / Math.sqrt(value) : 0)), weights);
-  const root = weightedMean(values.map(Math.sqrt), weights);
-  return root > 0 ? inverse / (2 * root) : 0;
+  const weights = points.map(({ weight }) => weight);
+  const mean = weightedMean(points.map(({ reading }) => (kind === "velocity" ? reading : Math.sqrt(reading))), weights);
+  const whole = Math.max(mean, LEAST_MEAN) * weights.reduce((total, weight) => total + weight, 0);
+  return { common: sum / whole, independent: Math.sqrt(squares) / whole };
 }
 
-/** Fluctuation of single readings: random, so it falls with the square root of their number. */
-export function fluctuationRow({ readings, traverse, options }: BudgetInput): Influence {
+/** Fluctuation of single readings: random and relative, so of n equal velocities the mean has 1/√n of it, of unequal ones a little more. */
+export function fluctuationRow({ readings, traverse: { points, velocities, average }, options }: BudgetInput): Influence {
   const each = options.fluctuationPercent ?? DEFAULT_FLUCTUATION_PERCENT;
   const sensitivity = readings.kind === "velocity_pressure" ? 0.5 : 1;
+  const parts = points.map(({ weight }, index) => weight * velocities[index]!);
+  const share = average > 0 ? Math.hypot(...parts) / parts.reduce((total, part) => total + part, 0) : 0;
   return {
     name: "fluctuation",
-    percent: (sensitivity * each) / Math.sqrt(traverse.points.length),
+    percent: sensitivity * each * share,
     origin: options.fluctuationPercent === undefined ? "default" : "given",
-    detail: `Each reading fluctuates by ${each} %, over √${traverse.points.length}`,
+    detail: `Each reading fluctuates by ${each} %, independent at each of ${points.length} points`,
   };
 }
 
@@ -77,10 +84,9 @@ export function fluctuationRow({ readings, traverse, options }: BudgetInput): In
 export function roundingRow({ readings, traverse, options }: BudgetInput): Influence {
   const step = options.resolution ?? writtenResolution(readings.lines);
   const { factor } = readings.kind === "velocity" ? UNITS.velocity[readings.unit] : UNITS.pressure[readings.unit];
-  const percent = 100 * (step / 2) * factor * RECTANGULAR * offsetSensitivity(readings, traverse.points);
   return {
     name: "rounding",
-    percent: percent / Math.sqrt(traverse.points.length),
+    percent: 100 * errorsOf((step / 2) * factor, readings, traverse.points).independent * RECTANGULAR,
     origin: options.resolution === undefined ? "default" : "given",
     detail: `Readings to the nearest ${step} ${readings.unit}, independent at each point`,
   };
