@@ -6,6 +6,7 @@ import { withCaller } from "@/lib/runtime/caller";
 import { config } from "@/lib/runtime/config";
 import { log } from "@/lib/runtime/log";
 import { runShutdownTasks } from "@/lib/runtime/shutdown";
+import { startHousekeeping } from "./housekeeping";
 
 /** Requests that are still running after this are cut off. */
 const STOP_TIMEOUT_MS = 9_000;
@@ -31,6 +32,7 @@ async function serve(): Promise<void> {
   await listen(server, HOST, PORT);
   log().info({ host: HOST, port: PORT, level: LOG_LEVEL }, "listening");
   stopOnRequest(server);
+  startHousekeeping();
   process.send?.("ready");
 }
 

@@ -1,18 +1,10 @@
 import { rmSync } from "node:fs";
 import path from "node:path";
-import { createServer } from "node:net";
 import { prepareDatabase } from "@/db/prepare";
 import { startPrivateServer, stopLeftover } from "@/db/privateServer";
 import { startApp } from "@/lib/launch/appProcess";
 import { ROOT } from "@/lib/launch/packages.mjs";
-
-const freePort = (): Promise<number> =>
-  new Promise((resolve) => {
-    const probe = createServer().listen(0, "127.0.0.1", () => {
-      const { port } = probe.address() as { port: number };
-      probe.close(() => resolve(port));
-    });
-  });
+import { freePort } from "./freePort";
 
 /** Starts MariaDB and the built application on a folder and ports of their own, for all tests that need them. */
 export default async function startRunningApp(): Promise<() => Promise<void>> {

@@ -1,4 +1,5 @@
 import type { ReadableStream as NodeReadableStream } from "node:stream/web";
+import { setImmediate } from "node:timers/promises";
 import { MOST_BATCH_LINES, batch } from "@/api-spec/calculations/batch";
 import { spendItems } from "@/lib/limits/planLimits";
 import { Problem } from "@/lib/problems/problem";
@@ -19,22 +20,30 @@ export function streamedBatch(request: Request, passage: Passage): Response {
 
   const stream = new ReadableStream<Uint8Array>({
     async pull(controller) {
-      const { value: lines, done } = await chunks.next();
-      if (done) {
-        end();
-        controller.close();
-        return;
-      }
-      const allowed = lines.slice(0, Math.max(0, MOST_BATCH_LINES - index));
-      const results = await runLines(allowed, index, passage);
-      index += allowed.length;
-      passage.items += allowed.length;
-      if (allowed.length < lines.length) results.push(failedItem(tooManyLines(), index, passage.requestId, ""));
-      if (results.length > 0) controller.enqueue(Buffer.from(results.map((result) => `${JSON.stringify(result)}\n`).join("")));
-      if (allowed.length < lines.length) {
-        end();
-        controller.close();
-        await chunks.return(undefined);
+      // A pull that gives nothing is not repeated, so it goes on until a chunk held the end of a line.
+      let given = false;
+      while (!given) {
+        // Lines that have arrived already would otherwise be run in one go, and nobody else be answered meanwhile.
+        await setImmediate();
+        const { value: lines, done } = await chunks.next();
+        if (done) {
+          end();
+          controller.close();
+          return;
+        }
+        const allowed = lines.slice(0, Math.max(0, MOST_BATCH_LINES - index));
+        const results = await runLines(allowed, index, passage);
+        index += allowed.length;
+        passage.items += allowed.length;
+        const tooMany = allowed.length < lines.length;
+        if (tooMany) results.push(failedItem(tooManyLines(), index, passage.requestId, ""));
+        if (results.length > 0) controller.enqueue(Buffer.from(results.map((result) => `${JSON.stringify(result)}\n`).join("")));
+        given = results.length > 0;
+        if (tooMany) {
+          end();
+          controller.close();
+          await chunks.return(undefined);
+        }
       }
     },
     async cancel() {
