@@ -31,7 +31,9 @@ const GREATEST_DENSITY = 2.5;
  * @param air Dry bulb −40 to 200 °C, absolute pressure 50 to 120 kPa; or a known density of 0.2 to 2.5 kg/m³. Left out: standard air.
  * @param standardDensity Density in kg/m³ that is assumed where no air is described.
  * @param path Where the air stands in the caller's input.
+ * @returns Density, pressure and humidity in SI, and what was assumed.
  * @throws {AirflowInputError} Outside the range, or a state that cannot be; names the field.
+ * @example resolveAir({ density: { value: 1.1, unit: "kg/m3" } }, 1.2).density // 1.1
  */
 export function resolveAir(air: Air | undefined, standardDensity: number, path: Path = ["air"]): ResolvedAir {
   if (!air) return { density: standardDensity, absolutePressure: null, humidityRatio: null, state: null, assumed: ["standard_air"] };
@@ -59,8 +61,11 @@ function resolveState(air: AirState, path: Path): ResolvedAir {
 
 /**
  * Checks a density that the caller knows.
- * @param density In kg/m³.
+ * @param density In kg/m³, 0.2 to 2.5.
+ * @param path Where it stands in the caller's input.
+ * @returns The same density in kg/m³.
  * @throws {AirflowInputError} No air between −40 and 200 °C and 50 and 120 kPa has it.
+ * @example knownDensity(1.1, ["air", "density"]) // 1.1
  */
 export function knownDensity(density: number, path: Path): number {
   if (density >= LEAST_DENSITY && density <= GREATEST_DENSITY) return density;

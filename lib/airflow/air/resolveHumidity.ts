@@ -13,8 +13,13 @@ const ROUNDING = 1e-9;
 
 /**
  * Humidity ratio in kg/kg from whichever form of humidity is given; dry where none is.
- * @param dryBulb In K. @param pressure Absolute, in Pa.
+ * @param air The state that was described.
+ * @param dryBulb In K.
+ * @param pressure Absolute, in Pa.
+ * @param path Where the air stands in the caller's input.
+ * @returns Humidity ratio in kg/kg, and whether dry air was assumed.
  * @throws {AirflowInputError} Two forms, or more water than the air can hold.
+ * @example resolveHumidity({ dryBulb: { value: 20, unit: "degC" } }, 293.15, 101325, ["air"]) // { ratio: 0, assumedDry: true }
  */
 export function resolveHumidity(air: AirState, dryBulb: number, pressure: number, path: Path): { ratio: number; assumedDry: boolean } {
   const [form, second] = FORMS.filter((one) => air[one] !== undefined);

@@ -11,7 +11,11 @@ const GREATEST_PRESSURE = 120_000;
 /**
  * Absolute pressure of the air in the duct, barometric plus static, in Pa. The barometric pressure is given, or that of
  * the standard atmosphere at the altitude, or that at sea level.
+ * @param air The state that was described.
+ * @param path Where it stands in the caller's input.
+ * @returns Pressure in Pa, and whether sea level was assumed.
  * @throws {AirflowInputError} Both pressure forms given, or a result outside 50 to 120 kPa.
+ * @example resolvePressure({ dryBulb: { value: 20, unit: "degC" } }, ["air"]) // { absolute: 101325, assumedSeaLevel: true }
  */
 export function resolvePressure(air: AirState, path: Path): { absolute: number; assumedSeaLevel: boolean } {
   if (air.altitude && air.barometricPressure) {

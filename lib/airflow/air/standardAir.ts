@@ -17,5 +17,10 @@ export const STANDARD_AIR_DENSITY: Record<StandardAirName, number> = {
   normal: dryAt(0, 101_325),
 };
 
-/** The standard air that is meant where none is named. */
+/**
+ * The standard air that is meant where none is named.
+ * @param system Units of the answer.
+ * @returns Its name.
+ * @example defaultStandardAir("si") // "iso"
+ */
 export const defaultStandardAir = (system: UnitSystem): StandardAirName => (system === "ip" ? "ashrae" : "iso");

@@ -50,7 +50,10 @@ interface Flow {
 
 /**
  * Airflow of a traverse: actual, standard and mass, with checks, uncertainty and the verdict against design.
+ * @param input As the API takes it.
+ * @returns As the API gives it, in the units asked for.
  * @throws {AirflowInputError} A duct, air or readings that cannot be.
+ * @example airflow({ duct: { shape: "rectangular", measured: "inside", width: { value: 0.5, unit: "m" }, height: { value: 0.4, unit: "m" } }, readings: { kind: "velocity", unit: "m/s", lines: [[4, 6]] }, units: "si" }).airflow.actual // { value: 1000, unit: "L/s" }
  */
 export function airflow(input: AirflowInput): AirflowAnswer {
   const options = resolveOptions(input);

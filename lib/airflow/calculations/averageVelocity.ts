@@ -24,7 +24,10 @@ export interface AverageVelocityAnswer extends VelocityAnswer {
 
 /**
  * Average velocity of a traverse from velocity pressures or indicated velocities.
+ * @param input As the API takes it.
+ * @returns As the API gives it, in the units asked for.
  * @throws {AirflowInputError} No reading, one out of range, or air that cannot be.
+ * @example averageVelocity({ readings: { kind: "velocity_pressure", unit: "Pa", lines: [[60, 15]] }, air: { density: { value: 1.2, unit: "kg/m3" } }, units: "si" }).averageVelocity // { value: 7.5, unit: "m/s" }
  */
 export function averageVelocity(input: AverageVelocityInput): AverageVelocityAnswer {
   const options = resolveOptions(input);

@@ -30,7 +30,10 @@ const INDICATION_LIMITS = [-1e6, 1e6] as const;
 
 /**
  * Corrects an indicated velocity or airflow from the air that the instrument assumed to the air that was there.
+ * @param input As the API takes it.
+ * @returns As the API gives it, in the units asked for.
  * @throws {AirflowInputError} A state of air that cannot be, or an indication that no instrument gives.
+ * @example densityCorrection({ quantity: { value: 10, unit: "m/s" }, principle: "thermal", from: "iso", to: { density: { value: 1, unit: "kg/m3" } }, units: "si" }).corrected // { value: 12, unit: "m/s" }
  */
 export function densityCorrection(input: DensityCorrectionInput): DensityCorrectionAnswer {
   const options = resolveOptions(input);

@@ -28,7 +28,10 @@ export interface DuctAreaAnswer {
 
 /**
  * Inside dimensions, area, perimeter and hydraulic diameter of a duct.
+ * @param input As the API takes it.
+ * @returns As the API gives it, in the units asked for.
  * @throws {AirflowInputError} A dimension that is not above 0, outside or inside.
+ * @example ductArea({ duct: { shape: "rectangular", measured: "inside", width: { value: 500, unit: "mm" }, height: { value: 400, unit: "mm" } }, units: "si" }).area // { value: 0.2, unit: "m2" }
  */
 export function ductArea(input: DuctAreaInput): DuctAreaAnswer {
   const { system, working } = resolveOptions(input);

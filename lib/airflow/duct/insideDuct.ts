@@ -15,7 +15,9 @@ const SMALLEST_DIMENSION = 0.001;
 
 /**
  * How far the duct's outside stands off its inside on each face: sheet or board, and lining.
+ * @param duct A duct, of which only the wall matters.
  * @returns Thickness in m, 0 where no wall is described.
+ * @example wallThickness({ shape: "round", measured: "outside", diameter: { value: 560, unit: "mm" }, wall: { thickness: { value: 2, unit: "mm" }, lining: { value: 28, unit: "mm" } } }) // 0.03
  */
 export function wallThickness({ wall }: Duct): number {
   const thickness = wall?.thickness ? toSi("length", wall.thickness) : 0;

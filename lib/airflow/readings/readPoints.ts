@@ -26,8 +26,12 @@ const GREATEST_WORDS = { velocity_pressure: "5 kPa (20 in wg)", velocity: "100 m
 
 /**
  * The points of a traverse that were read, in the order read.
+ * @param readings As written.
+ * @param instrument Its calibration applies to the readings first.
  * @param negative Whether a reading below zero counts as zero, and stays in the count, or is refused.
+ * @returns Readings in Pa or m/s, and how many places had none.
  * @throws {AirflowInputError} No point was read; a reading is out of range; weights do not fit the readings.
+ * @example readPoints({ kind: "velocity", unit: "m/s", lines: [[5, null]] }, undefined) // { points: [{ line: 1, point: 1, reading: 5, weight: 1, wasNegative: false }], skipped: 1 }
  * @see AMCA 203 (from memory): a negative velocity pressure counts as zero and stays in the count.
  */
 export function readPoints(readings: Readings, instrument: Instrument | undefined, negative: NegativeReadings = "count_as_zero"): ReadPoints {

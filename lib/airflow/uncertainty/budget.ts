@@ -46,6 +46,9 @@ const COVERAGE_FACTOR = 2;
 /**
  * The uncertainty budget of an airflow: relative standard uncertainties of independent influences combined in
  * quadrature, u_c² = Σ u_i², and expanded with k = 2 (about 95 %).
+ * @param input What was measured, and what is known of it.
+ * @returns Each influence and their combination, in percent of the airflow.
+ * @throws {AirflowInputError} An accuracy or a half-width that cannot be.
  * @see GUM, ISO/IEC Guide 98-3, 5.1 and 6.2; the influences are those of ISO 3966. Defaults are engineering judgement.
  */
 export function uncertaintyBudget(input: BudgetInput): Budget {

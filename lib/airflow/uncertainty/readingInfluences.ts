@@ -92,7 +92,12 @@ export function roundingRow({ readings, traverse, options }: BudgetInput): Influ
   };
 }
 
-/** The step between readings as they were written: one in the last decimal place that any of them uses. */
+/**
+ * The step between readings as they were written: one in the last decimal place that any of them uses.
+ * @param lines The readings.
+ * @returns The step, in the unit of the readings.
+ * @example writtenResolution([[0.061, 0.07]]) // 0.001
+ */
 export function writtenResolution(lines: readonly (readonly (number | null)[])[]): number {
   let places = 0;
   for (const line of lines) for (const reading of line) if (reading !== null) places = Math.max(places, decimalPlaces(reading));

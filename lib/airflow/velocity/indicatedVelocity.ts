@@ -4,7 +4,9 @@ import type { InstrumentPrinciple } from "../types";
  * Factor from what an instrument indicates to the actual velocity (or airflow), by its principle. An instrument that
  * senses differential pressure and assumed density ρ₀ gives √(ρ₀ / ρ); a thermal one that reads standard velocity ρ₀ / ρ;
  * a rotating vane, or an instrument that already compensates, 1.
- * @param assumedDensity ρ₀ in kg/m³. @param density ρ in kg/m³.
+ * @param principle How the instrument senses velocity.
+ * @param assumedDensity ρ₀ in kg/m³.
+ * @param density ρ in kg/m³.
  * @returns Factor, without unit.
  * @example indicationFactor("thermal", 1.2, 1.0) // 1.2
  * @see Bernoulli's equation (differential pressure); conservation of mass flux (thermal).

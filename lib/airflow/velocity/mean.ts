@@ -1,6 +1,7 @@
 /**
  * Mean over the points of a traverse, Σ w x / Σ w; with equal weights the arithmetic mean.
- * @param values One for each point. @param weights Above 0, one for each point.
+ * @param values One for each point.
+ * @param weights Above 0, one for each point.
  * @returns The mean, in the unit of the values.
  * @example weightedMean([1, 2, 6], [1, 1, 1]) // 3
  */
@@ -16,6 +17,7 @@ export function weightedMean(values: readonly number[], weights: readonly number
 
 /**
  * Sample standard deviation, √(Σ (x − x̄)² / (n − 1)).
+ * @param values At least one.
  * @returns In the unit of the values; 0 for a single value.
  * @example standardDeviation([2, 4, 6]) // 2
  */

@@ -25,7 +25,14 @@ export interface PointVelocities {
 /**
  * Actual velocity at each point. From a velocity pressure by Bernoulli's equation, with the correction for
  * compressibility where it exceeds 0.05 %; from an indicated velocity by the instrument's principle.
+ * @param readings What was read, for its kind.
+ * @param points The readings in Pa or m/s.
+ * @param air The air in the duct.
+ * @param probe Its coefficient is 0.5 to 1.5; 1 where none is given.
+ * @param instrument Its principle decides the correction of an indicated velocity; none where it is left out.
  * @param standardDensity Density in kg/m³ that an instrument assumed where it does not say.
+ * @returns Velocities in m/s.
+ * @throws {AirflowInputError} A coefficient or an assumed density that cannot be.
  */
 export function pointVelocities(readings: Readings, points: ReadPoint[], air: ResolvedAir, probe: Probe | undefined, instrument: Instrument | undefined, standardDensity: number): PointVelocities {
   if (readings.kind === "velocity") {

@@ -18,6 +18,12 @@ export interface TraverseVelocity extends PointVelocities {
 /**
  * From readings to the average velocity. Velocities are averaged, never pressures: the velocity of a mean pressure
  * overstates the flow wherever the profile is not flat.
+ * @param readings As written.
+ * @param air The air in the duct.
+ * @param standardDensity Density in kg/m³ that an instrument assumed where it does not say.
+ * @returns Velocities in m/s.
+ * @throws {AirflowInputError} No reading, one out of range, or a probe or instrument that cannot be.
+ * @see AMCA 203 (from memory): the mean of the roots, not the root of the mean.
  */
 export function traverseVelocity(
   readings: Readings,
