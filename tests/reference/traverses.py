@@ -12,7 +12,7 @@ import math
 IN, FT, LB = 0.0254, 0.3048, 0.45359237
 INWG = 1000 * 9.80665 * 0.0254
 LENGTH = {"in": IN, "ft": FT, "mm": 1e-3, "cm": 1e-2, "m": 1.0}
-PRESSURE = {"in_wg": INWG, "Pa": 1.0, "kPa": 1e3, "hPa": 1e2, "inHg": 13595.1 * 9.80665 * 0.0254, "psi": LB * 9.80665 / IN**2}
+PRESSURE = {"in_wg": INWG, "Pa": 1.0, "kPa": 1e3, "hPa": 1e2, "mbar": 1e2, "inHg": 13595.1 * 9.80665 * 0.0254, "psi": LB * 9.80665 / IN**2}
 VELOCITY = {"ft/min": FT / 60, "m/s": 1.0}
 DENSITY = {"lb/ft3": LB / FT**3, "kg/m3": 1.0}
 
@@ -62,7 +62,10 @@ def density_of(air):
     elif "wetBulb" in air:
         t, w = T - 273.15, kelvin(air["wetBulb"]) - 273.15
         Ws = ratio_at(saturation(w + 273.15), p)
-        W = ((2501 - 2.326 * w) * Ws - 1.006 * (t - w)) / (2501 + 1.86 * t - 4.186 * w)
+        if w >= 0:
+            W = ((2501 - 2.326 * w) * Ws - 1.006 * (t - w)) / (2501 + 1.86 * t - 4.186 * w)
+        else:
+            W = ((2830 - 0.24 * w) * Ws - 1.006 * (t - w)) / (2830 + 1.86 * t - 2.1 * w)
     return p * (1 + W) / (287.042 * T * (1 + 1.607858 * W)), p
 
 
@@ -81,11 +84,14 @@ def area_of(duct):
 def solve(case):
     rho, p = density_of(case["air"])
     readings, instrument = case["readings"], case.get("instrument")
+    calibration = (instrument or {}).get("calibration", {})
     total = count = 0
-    for line in readings["lines"]:
-        for r in line:
+    for i, line in enumerate(readings["lines"]):
+        for j, r in enumerate(line):
             if r is None:
                 continue
+            r = calibration.get("gain", 1.0) * r + calibration.get("offset", 0.0)
+            weight = readings["weights"][i][j] if "weights" in readings else 1
             if readings["kind"] == "velocity_pressure":
                 dp = max(0.0, r * PRESSURE[readings["unit"]])
                 v = case.get("probe", {}).get("coefficient", 1.0) * math.sqrt(2 * dp / rho)
@@ -98,8 +104,8 @@ def solve(case):
                 if instrument:
                     r0 = si(instrument["assumedDensity"], DENSITY) if "assumedDensity" in instrument else case["standard"]
                     v *= {"differential_pressure": math.sqrt(r0 / rho), "thermal": r0 / rho, "rotating_vane": 1.0}[instrument["principle"]]
-            total += v
-            count += 1
+            total += weight * v
+            count += weight
     q = area_of(case["duct"]) * total / count
     return {"density": rho, "averageVelocity": total / count, "actual": q, "mass": rho * q, "standard": rho * q / case["standard"]}
 
@@ -108,7 +114,12 @@ def q(value, unit):
     return {"value": value, "unit": unit}
 
 
-STANDARD = {"ip": 0.075 * LB / FT**3, "si": 1.2}
+STANDARD = {
+    "ashrae": 0.075 * LB / FT**3,
+    "iso": 1.2,
+    "epa": 29.92 * PRESSURE["inHg"] / (287.042 * 293.15),
+    "normal": 101325 / (287.042 * 273.15),
+}
 VP25 = [[0.061, 0.074, 0.078, 0.073, 0.06], [0.071, 0.088, 0.092, 0.086, 0.07], [0.075, 0.091, 0.095, 0.09, 0.073], [0.07, 0.087, 0.091, 0.087, 0.071], [0.06, 0.073, 0.077, 0.074, 0.062]]
 V12 = [[812, 934, 1010, 1004, 921, 806], [798, 926, 1013, 1009, 930, 811]]
 PA20 = [[31.2, 40.1, 44.8, 47.0, 51.3, 50.9, 46.6, 44.1, 39.2, 30.4], [29.8, 39.5, 45.2, 46.1, 52.0, 51.1, 47.3, 43.9, 40.6, 31.5]]
@@ -139,10 +150,16 @@ CASES = [
      "readings": {"kind": "velocity", "unit": "ft/min", "lines": V12}, "air": {"dryBulb": q(303.15, "K"), "relativeHumidity": q(100, "percent"), "barometricPressure": q(990, "hPa")}},
     {"title": "round, velocity pressure in psi, 10,000 ft, ip", "units": "ip", "duct": {"shape": "round", "measured": "inside", "diameter": q(20, "in")},
      "readings": {"kind": "velocity_pressure", "unit": "psi", "lines": [[0.0021, 0.0029, 0.0034, 0.0033, 0.0027, 0.002], [0.0022, 0.003, 0.0035, 0.0033, 0.0028, 0.0021]]}, "air": {"dryBulb": q(45, "degF"), "altitude": q(10000, "ft")}},
+    {"title": "custom layout with weights, wet bulb below freezing, normal air, si", "units": "si", "standardAir": "normal", "duct": {"shape": "rectangular", "measured": "inside", "width": q(800, "mm"), "height": q(500, "mm")},
+     "readings": {"kind": "velocity_pressure", "unit": "Pa", "lines": [[22.5, 31, 24.1], [26.2, 35.4, 27.7]], "weights": [[1, 2.5, 1], [2, 5, 2]]}, "air": {"dryBulb": q(-2, "degC"), "wetBulb": q(-3.5, "degC"), "barometricPressure": q(940, "mbar")}},
+    {"title": "calibrated thermal instrument, dry stack standard air, ip", "units": "ip", "standardAir": "epa", "duct": {"shape": "round", "measured": "inside", "diameter": q(18, "in")},
+     "readings": {"kind": "velocity", "unit": "ft/min", "lines": V12}, "instrument": {"principle": "thermal", "assumedDensity": q(0.075, "lb/ft3"), "calibration": {"gain": 1.015, "offset": -6}}, "air": {"dryBulb": q(140, "degF"), "dewPoint": q(88, "degF"), "barometricPressure": q(28.4, "inHg"), "ductStaticPressure": q(-4.5, "in_wg")}},
+    {"title": "differential pressure instrument in SI that assumed standard air, below sea level, si", "units": "si", "duct": {"shape": "flat_oval", "measured": "outside", "major": q(0.9, "m"), "minor": q(350, "mm"), "wall": {"thickness": q(1.2, "mm"), "lining": q(25, "mm")}},
+     "readings": {"kind": "velocity", "unit": "m/s", "lines": MS9}, "instrument": {"principle": "differential_pressure"}, "air": {"dryBulb": q(33, "degC"), "relativeHumidity": q(62, "percent"), "altitude": q(-120, "m")}},
 ]
 
 for case in CASES:
-    case["standard"] = STANDARD[case["units"]]
+    case["standard"] = STANDARD[case.get("standardAir", "ashrae" if case["units"] == "ip" else "iso")]
     case["expected"] = solve(case)
     del case["standard"]
 print(json.dumps({"command": "python3 tests/reference/traverses.py > tests/reference/traverses.json", "cases": CASES}, indent=1))
