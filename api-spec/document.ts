@@ -106,7 +106,10 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
           }),
         },
         ...(status !== "204" && {
-          content: { "application/json": { schema: definition.answer, ...(examples && { examples: examples.answer }) } },
+          content: {
+            "application/json": { schema: definition.answer, ...(examples && { examples: examples.answer }) },
+            ...(definition.figure && { "image/svg+xml": { schema: { type: "string" as const, description: "The same as a drawing." } } }),
+          },
         }),
       },
       ...problemResponses(definition),

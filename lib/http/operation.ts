@@ -19,6 +19,13 @@ export interface Call<Body, Query, Params> {
 /** A plain web handler. `params` are the parts of the path, as Next.js passes them. */
 export type Handler = (request: Request, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
 
+/** Whether the caller asks for the drawing and not, or not rather, for JSON. */
+function prefersSvg(request: Request): boolean {
+  const accept = request.headers.get("accept") ?? "";
+  const [svg, json] = [accept.indexOf("image/svg+xml"), accept.indexOf("application/json")];
+  return svg >= 0 && (json < 0 || svg < json);
+}
+
 /**
  * Makes the handler of an operation: key, limits, validation, the operation itself, answer.
  * Whatever is thrown on the way becomes a problem; whatever the outcome, it is counted.
@@ -26,6 +33,8 @@ export type Handler = (request: Request, context: { params: Promise<Record<strin
 export function operation<Body extends z.ZodType, Answer extends z.ZodType, Query extends z.ZodType, Params extends z.ZodType>(
   definition: OperationDefinition<Body, Answer, Query, Params>,
   run: (call: Call<z.output<Body>, z.output<Query>, z.output<Params>>) => z.input<Answer> | Promise<z.input<Answer>>,
+  /** Draws the answer, for operations whose definition has a figure. */
+  draw?: (input: z.output<Body>) => string,
 ): Handler {
   return async (request, context) => {
     const passage = beginPassage();
@@ -38,6 +47,11 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
         key: passage.key,
         requestId: passage.requestId,
       } as Call<z.output<Body>, z.output<Query>, z.output<Params>>;
+      if (draw && prefersSvg(request)) {
+        const drawing = Buffer.from(draw(call.input));
+        endPassage(definition, passage, 200, null);
+        return new Response(drawing, { headers: { ...passageHeaders(passage), "Content-Type": "image/svg+xml; charset=utf-8", Vary: "Accept" } });
+      }
       const answer = await run(call);
       const status = definition.status ?? 200;
       const response = status === 204 ? new Response(null, { status, headers: passageHeaders(passage) }) : jsonAnswer(answer, status, passage);

@@ -8,6 +8,8 @@ import { ensureBuild } from "@/lib/launch/build";
 import { ensureDebianProgram, MARIADB } from "@/lib/launch/debian";
 import { ROOT } from "@/lib/launch/packages.mjs";
 import { makeKey, makeOrganisation, testDatabase } from "../support/accounts";
+import { benchBatch } from "./batch";
+import { benchEngine } from "./engine";
 import { measure, requestsPerSecond, summary, type Round, type Target } from "./load";
 
 const BARE = path.join(ROOT, "tests/bench/bare");
@@ -62,6 +64,8 @@ export async function main(): Promise<void> {
     row("bare Next.js route handler: parse and echo", summary(rounds, "bare", "bare"));
     row("airflow: key, limits, validation, engine, usage", summary(rounds, "airflow", "bare"));
     row("the same on a second instance, one database", summary(rounds, "second", "bare"));
+    benchEngine(BODY);
+    await benchBatch(`http://127.0.0.1:${PORTS.one}/api/v1/calculations/batch`, text, BODY, one.child.pid!);
     await bothAtOnce(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
   } finally {
     bare.kill("SIGTERM");
