@@ -43,8 +43,8 @@ async function streamed(url: string, headers: Record<string, string>, item: stri
   const answer = await fetch(url, { method: "POST", body: lines, duplex: "half", headers: { ...headers, "content-type": "application/x-ndjson" } } as RequestInit);
   let answered = 0;
   let next = LINES / 10;
-  for await (const chunk of answer.body!) {
-    for (const byte of chunk as Uint8Array) if (byte === 10) answered += 1;
+  for await (const chunk of answer.body as unknown as AsyncIterable<Uint8Array>) {
+    for (const byte of chunk) if (byte === 10) answered += 1;
     if (answered >= next) {
       samples.push(resident());
       next += LINES / 10;
