@@ -39,6 +39,7 @@ describe("the inside of a duct", () => {
     ["a dimension of a mile", { ...ROUND, diameter: { value: 5280, unit: "ft" } }, "duct/diameter", "dimension_too_large"],
     ["lining that fills the duct", { shape: "round", measured: "outside", diameter: inches(4), wall: { lining: inches(2) } }, "duct/diameter", "inside_dimension_not_positive"],
     ["a negative lining", { shape: "round", measured: "outside", diameter: inches(4), wall: { lining: inches(-1) } }, "duct/wall/lining", "negative_wall"],
+    ["a negative board, though it was measured inside", { ...ROUND, wall: { thickness: inches(-1) } }, "duct/wall/thickness", "negative_wall"],
     ["a flat oval taller than wide", { shape: "flat_oval", measured: "inside", major: inches(10), minor: inches(12) }, "duct/minor", "minor_exceeds_major"],
   ])("refuses %s", (_, duct, path, code) => expect(faultsOf(() => ductArea({ duct }))).toEqual([{ path, code }]));
 
@@ -123,6 +124,56 @@ describe("airflow against design", () => {
     expect(airflow({ ...measured, air, design: { ...design, basis: "standard" } }).design!.percent).toBeCloseTo(80, 9);
   });
   it("refuses a design of 0", () => expect(faultsOf(() => airflow({ ...measured, design: { airflow: { value: 0, unit: "ft3/min" } } }))).toEqual([{ path: "design/airflow", code: "design_out_of_range" }]));
+});
+
+describe("what averaging pressures would have given", () => {
+  it("is the same where all readings are, in slow air and in air that compresses", () => {
+    for (const pressure of [60, 2000]) {
+      const { averageVelocity: mean, averagingPressuresWouldGive } = averageVelocity({ readings: { kind: "velocity_pressure", unit: "Pa", lines: [[pressure, pressure]] }, units: "si" });
+      expect(averagingPressuresWouldGive!.value).toBeCloseTo(mean.value, 9);
+    }
+  });
+  it("is more where they differ, and is not said of velocities", () => {
+    const { averageVelocity: mean, averagingPressuresWouldGive } = averageVelocity({ readings: PRESSURES });
+    expect(averagingPressuresWouldGive!.value).toBeGreaterThan(mean.value);
+    expect(averageVelocity({ readings: READINGS }).averagingPressuresWouldGive).toBeNull();
+  });
+});
+
+describe("the uncertainty budget", () => {
+  const rowOf = (input: Partial<AirflowInput>, name: string): number => airflow({ duct: ROUND, readings: READINGS, ...input }).uncertainty.budget.find((row) => row.name === name)!.percent;
+
+  it("says of every row whether it was given or is a default", () => {
+    const origins = (input: Partial<AirflowInput>): string[] => airflow({ duct: ROUND, readings: READINGS, ...input }).uncertainty.budget.map(({ origin }) => origin);
+    expect(new Set(origins({}))).toEqual(new Set(["default"]));
+    const uncertainty = { dimension: inches(0.1), densityPercent: 1, layoutPercent: 1, sitePercent: 1, fluctuationPercent: 1, resolution: 1 };
+    expect(new Set(origins({ instrument: { principle: "thermal", accuracy: { percentOfReading: 3 } }, uncertainty }))).toEqual(new Set(["given"]));
+  });
+  it("takes density by what the instrument senses, and for the design by what it does to that airflow", () => {
+    const uncertainty = { densityPercent: 4, layoutPercent: 0, sitePercent: 0, fluctuationPercent: 0, resolution: 0, dimension: inches(0) };
+    const expanded = (principle: "thermal" | "rotating_vane" | "differential_pressure", basis: "actual" | "standard"): number => {
+      const { airflow: flow, design } = airflow({ duct: ROUND, readings: READINGS, instrument: { principle, accuracy: { percentOfReading: 0 } }, uncertainty, design: { airflow: { value: 1000, unit: "ft3/min" }, basis } });
+      return (100 * design!.expandedUncertainty.value) / flow[basis].value;
+    };
+    expect(expanded("differential_pressure", "actual")).toBeCloseTo(4, 9);
+    expect(expanded("differential_pressure", "standard")).toBeCloseTo(4, 9);
+    expect(expanded("thermal", "actual")).toBeCloseTo(8, 9);
+    expect(expanded("thermal", "standard")).toBeCloseTo(0, 9);
+    expect(expanded("rotating_vane", "actual")).toBeCloseTo(0, 9);
+    expect(expanded("rotating_vane", "standard")).toBeCloseTo(8, 9);
+  });
+  it("takes the site as good, disturbed or unknown", () => {
+    const site = (downstream: number, upstream: number) => rowOf({ site: { downstream: inches(14 * downstream), upstream: inches(14 * upstream) } }, "site");
+    expect([site(7.5, 3), site(7.4, 3), site(7.5, 2.9), rowOf({}, "site")]).toEqual([0, 1.5, 1.5, 1]);
+  });
+  it("takes the resolution from the digits written", () => {
+    expect(rowOf({ readings: { ...READINGS, lines: [[900, 1000.5]] } }, "rounding")).toBeCloseTo(rowOf({ readings: { ...READINGS, lines: [[900, 1000.5]] }, uncertainty: { resolution: 0.1 } }, "rounding"), 12);
+  });
+  it("stays finite where no air moves", () => {
+    const { uncertainty } = airflow({ duct: ROUND, readings: { ...PRESSURES, lines: [[0, 0, -0.001]] }, instrument: { principle: "differential_pressure", accuracy: { absolute: { value: 0.001, unit: "in_wg" } } } });
+    expect(uncertainty.expanded.value).toBe(0);
+    expect(Number.isFinite(uncertainty.expandedPercent)).toBe(true);
+  });
 });
 
 describe("checks", () => {

@@ -3,7 +3,7 @@ import type { CheckFunction } from "./context";
 
 const GREATEST_DIFFERENCE_PERCENT = 20;
 
-/** Halves of the grid that differ: along the lines, and across them. */
+/** Halves of the grid that differ: along the lines, and across them. The lines of a round duct are its diameters. */
 export const profileAsymmetry: CheckFunction = ({ readings, traverse }) => {
   const differences = [alongLines(readings.lines, traverse.points, traverse.velocities), acrossLines(readings.lines.length, traverse.points, traverse.velocities)];
   const known = differences.filter((difference) => difference !== null);
@@ -16,7 +16,7 @@ export const profileAsymmetry: CheckFunction = ({ readings, traverse }) => {
     severity: "caution",
     detail: passed
       ? "Both halves of the profile carry about the same flow."
-      : "One half of the duct carries much more than the other, as it does behind an elbow, a damper or a branch. The traverse may not represent the flow.",
+      : "One half of the duct, or one of its diameters, carries much more than the other, as behind an elbow, a damper or a branch. The traverse may not represent the flow.",
     compared: { quantity: "difference of the halves' averages over the average", value: difference, limit: GREATEST_DIFFERENCE_PERCENT, unit: "percent" },
     source: "common practice, no source",
   };

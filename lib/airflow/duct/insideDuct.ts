@@ -35,7 +35,8 @@ export function wallThickness({ wall }: Duct): number {
  * @example insideDuct({ shape: "round", measured: "inside", diameter: { value: 500, unit: "mm" } }) // { shape: "round", diameter: 0.5 }
  */
 export function insideDuct(duct: Duct, path: Path = ["duct"]): InsideDuct {
-  const reduction = duct.measured === "outside" ? 2 * checkedWall(duct, path) : 0;
+  const wall = checkedWall(duct, path);
+  const reduction = duct.measured === "outside" ? 2 * wall : 0;
   const faults: InputFault[] = [];
   const inside = (name: string, dimension: Quantity<LengthUnit>): number => {
     const measured = toSi("length", dimension);
