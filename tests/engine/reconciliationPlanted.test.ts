@@ -113,7 +113,7 @@ const PLANT: Record<string, (sheet: Sheet) => Planted | null> = {
 const TRIALS_A_KIND = 2_000;
 const table: Record<string, Record<string, string | number>> = {};
 
-describe("a slip planted at random in a random traverse", () => {
+describe("a slip planted at random in a random traverse", { timeout: 60_000 }, () => {
   it.each(Object.keys(PLANT))("%s is first or tied for first in at least 99 per cent of 2,000 trials", (kind) => {
     let [found, alone, explanations, reproduced] = [0, 0, 0, 0];
     for (let trial = 0; trial < TRIALS_A_KIND; ) {

@@ -1,6 +1,6 @@
 import { openCase, type Case, type CaseInput } from "../reconciliation/case";
 import { explain, type Conclusion, type Explained } from "../reconciliation/explain";
-import type { Finding } from "../reconciliation/judge";
+import { assumptionsOf, type Finding } from "../reconciliation/judge";
 import { inOrder, type ReportedFigure } from "../reconciliation/reported";
 import { NOTHING_CARRIED, reproduce, type Reproduction } from "../reconciliation/reproduce";
 import type { FigureName, Slip } from "../reconciliation/slip";
@@ -35,6 +35,8 @@ export interface ExplanationAnswer extends Slip {
   explains: FigureName[];
   /** Every figure as it comes out with the slip, in the unit reported. */
   figures: { figure: FigureName; value: number }[];
+  /** What ranks: one for each slip, one more where a reading or figure had to be picked to fit. */
+  assumptions: number;
   rank: number;
   /** Whether another explanation has the same rank. */
   tied: boolean;
@@ -78,19 +80,19 @@ const figureAnswer = ({ figure, value, unit, rounding }: ReportedFigure, { value
   figure, reported: value, recomputed, difference: value - recomputed, unit, rounding, withinRounding: reproduced,
 });
 
-/** Findings come best first; those that explain as much by as few slips share a rank. */
+/** Findings come best first; those that explain as much by as few assumptions share a rank. */
 function ranked(findings: readonly Finding[]): ExplanationAnswer[] {
-  const merit = ({ explains, slips }: Finding): string => `${explains.length} ${slips.length}`;
-  const merits = findings.map(merit);
-  return findings.map(({ slips, explains, reproductions }, index) => {
-    const [last, ...before] = [...slips].reverse();
+  const merits = findings.map((finding) => `${finding.explains.length} ${assumptionsOf(finding)}`);
+  return findings.map((finding, index) => {
+    const { slips, explains, reproductions } = finding;
     return {
-      ...last!,
-      also: before.reverse(),
+      ...slips.at(-1)!,
+      also: slips.slice(0, -1),
       explains,
       figures: reproductions.map(({ figure, value }) => ({ figure, value })),
+      assumptions: assumptionsOf(finding),
       rank: merits.indexOf(merits[index]!) + 1,
-      tied: merits.filter((other) => other === merits[index]).length > 1,
+      tied: merits.indexOf(merits[index]!) !== merits.lastIndexOf(merits[index]!),
     };
   });
 }
@@ -100,7 +102,7 @@ function inWords({ conclusion, findings, tooManyPairs }: Explained): string {
     case "agrees":
       return "Every reported figure agrees with the readings within the rounding of its digits.";
     case "explained":
-      return findings.length === 1 ? "One explanation accounts for everything that disagrees." : `${findings.length} explanations account equally well for everything that disagrees; the figures cannot tell which it was.`;
+      return findings.length === 1 ? "One explanation accounts for everything that disagrees." : `${findings.length} explanations account for everything that disagrees; the figures cannot tell those of one rank apart.`;
     case "explained_by_two_slips":
       return `No single slip accounts for everything that disagrees; ${findings.length === 1 ? "one pair of slips does" : `${findings.length} pairs of slips do`}.`;
     case "partly_explained":

@@ -56,6 +56,8 @@ export interface Case {
   basis: "actual" | "standard";
   /** Unit that velocities were worked in. */
   velocityUnit: VelocityUnit;
+  /** Whether a reading counts as something else than what is written. */
+  isCalibrated: boolean;
   /** A reading as it counts: calibrated, never below 0, in the unit of the readings. */
   effective: (written: number) => number;
   /** Velocities in m/s of readings as they count. */
@@ -78,6 +80,7 @@ export function openCase(input: CaseInput, standardDensity: number, system: Unit
   const total = totalUnit(reported.total, readings, points, velocityUnit);
   return {
     readings, readingFactor, points, traverse, duct, air, standardDensity, system, velocityUnit, effective,
+    isCalibrated: gain !== 1 || offset !== 0,
     places: placesOf(readings.lines),
     pointsInAll: points.length + traverse.skipped,
     equalWeights: readings.weights === undefined,

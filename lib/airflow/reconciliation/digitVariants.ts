@@ -28,9 +28,10 @@ const digitAt = (whole: number, place: number): number => Math.floor(whole / pow
  * where it is unless it is what moved.
  * @param written Any number of up to 15 digits. @param places Decimal places it is written with, 0 to 12.
  * @param visit Called with each slip and the number it makes; never with the number itself.
+ * @param low Numbers below may be passed over. @param high Numbers above may be passed over.
  * @example forEachDigitVariant(1094, 0, visit) // visits ("digit_changed", 1034), ("digits_swapped", 1049), ("digit_dropped", 194) …
  */
-export function forEachDigitVariant(written: number, places: number, visit: (slip: DigitSlip, used: number) => void): void {
+export function forEachDigitVariant(written: number, places: number, visit: (slip: DigitSlip, used: number) => void, low = -Infinity, high = Infinity): void {
   const whole = Math.round(Math.abs(written) * power(places));
   const sign = written < 0 ? -1 : 1;
   let length = Math.max(1, places);
@@ -44,8 +45,9 @@ export function forEachDigitVariant(written: number, places: number, visit: (sli
   };
   changed(digits);
   swapped(digits);
-  dropped(digits);
-  addedBeforePoint(digits);
+  const first = power(length - 1) / power(places);
+  if (sign < 0 || places > 0 || low < first) dropped(digits);
+  if (sign < 0 || high >= 10 * first) addedBeforePoint(digits);
   addedAfterPoint(digits);
   for (const shift of [1, 2]) {
     digits.visit("decimal_moved", whole * power(shift), places);

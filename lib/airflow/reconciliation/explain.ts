@@ -1,7 +1,7 @@
 import type { Case } from "./case";
 import { methodSlips, readingSlips, singleSlips } from "./families";
 import type { Hypothesis } from "./hypothesis";
-import { identityOf, judgeOf, type Finding, type Judge } from "./judge";
+import { assumptionsOf, identityOf, judgeOf, type Finding, type Judge } from "./judge";
 import { readingPairs } from "./readingPairs";
 import { NOTHING_CARRIED, reproduce } from "./reproduce";
 import { dimensionDigits } from "./slips/dimensionDigits";
@@ -45,7 +45,7 @@ export function explain(one: Case): Explained {
 
   const { pairs, tooMany } = pairsOfSlips(one, right, judge, distinct(singles));
   if (pairs.length > 0) return { conclusion: "explained_by_two_slips", findings: pairs, tooManyPairs: false };
-  const partial = distinct(singles).sort((first, second) => second.explains.length - first.explains.length);
+  const partial = distinct(singles);
   return { conclusion: partial.length > 0 ? "partly_explained" : "unexplained", findings: partial, tooManyPairs: tooMany };
 }
 
@@ -83,12 +83,12 @@ function fewestSlips(findings: Finding[]): Finding[] {
   return findings.filter(({ slips }) => slips.length === fewest);
 }
 
-/** One finding for each set of slips: the first that explains most. */
+/** One finding for each set of slips, the one that explains most; those that explain most come first, by as few assumptions as may be. */
 function distinct(findings: readonly Finding[]): Finding[] {
   const best = new Map<string, Finding>();
   for (const finding of findings) {
     const known = best.get(identityOf(finding));
     if (!known || finding.explains.length > known.explains.length) best.set(identityOf(finding), finding);
   }
-  return [...best.values()];
+  return [...best.values()].sort((first, second) => second.explains.length - first.explains.length || assumptionsOf(first) - assumptionsOf(second));
 }

@@ -2,7 +2,7 @@ import type { Case } from "./case";
 import { DIGIT_SLIPS } from "./digitVariants";
 import type { Hypothesis } from "./hypothesis";
 import { ALL_CARRIED, NOTHING_CARRIED, reproduce, type Carried, type Reproduction } from "./reproduce";
-import type { FigureName, SlipName } from "./slip";
+import { DIMENSIONS, type FigureName, type SlipName } from "./slip";
 import type { Worksheet } from "./worksheet";
 
 /** A hypothesis that accounts for part or all of what disagrees, and spoils nothing that agrees. */
@@ -44,3 +44,13 @@ export const identityOf = ({ slips }: Pick<Hypothesis, "slips">): string =>
   slips.map(({ slip, at, figure, used }) => [slip, at?.line, at?.point, figure, isChosen(slip) ? used : ""].join(" ")).sort().join(" + ");
 
 const isChosen = (slip: SlipName): boolean => slip === "wrong_count" || (DIGIT_SLIPS as readonly SlipName[]).includes(slip);
+
+/** Slips that can be made only one way, once the duct, the air and the readings are there. */
+const WITHOUT_CHOICE: readonly SlipName[] = ["outside_for_inside", "wall_subtracted_once", "radius_for_diameter", "area_conversion", "pressures_averaged", "density_ignored", "unit_confused", "rounded_early"];
+
+/**
+ * How much has to be assumed: one for each slip, and one more where it could have been made at many readings or figures, so that
+ * one of them had to be picked to fit.
+ */
+export const assumptionsOf = ({ slips }: Pick<Hypothesis, "slips">): number =>
+  slips.reduce((sum, { slip, figure }) => sum + (WITHOUT_CHOICE.includes(slip) && !(DIMENSIONS as readonly (FigureName | undefined)[]).includes(figure) ? 1 : 2), 0);

@@ -4,9 +4,9 @@ import type { QuantityOf } from "../../units/units";
 import type { Case } from "../case";
 import { forEachDigitVariant, placesOf } from "../digitVariants";
 import type { Hypothesis, SlipFamily } from "../hypothesis";
-import { ALL_CARRIED, dimensionsOf, reproduce } from "../reproduce";
-import type { DimensionName, FigureName } from "../slip";
-import type { Worksheet } from "../worksheet";
+import { ALL_CARRIED, dimensionsOf, isReproduced, reproduce } from "../reproduce";
+import type { DimensionName } from "../slip";
+import { areaOn, type Worksheet } from "../worksheet";
 
 /** A dimension of the duct used with a slip in its digits: only such as make the area come out, or without it the airflow. */
 export const dimensionDigits: SlipFamily = (one, sheet) => {
@@ -25,7 +25,11 @@ export const dimensionDigits: SlipFamily = (one, sheet) => {
   });
 };
 
-const fits = (one: Case, sheet: Worksheet, figure: FigureName): boolean => reproduce(one, sheet, ALL_CARRIED).some((found) => found.figure === figure && found.reproduced);
+function fits(one: Case, sheet: Worksheet, telling: "area" | "airflow"): boolean {
+  const { area } = one.figures;
+  if (telling === "area" && area) return isReproduced(areaOn(one, sheet)! / area.factor, area);
+  return reproduce(one, sheet, ALL_CARRIED).some(({ figure, reproduced }) => figure === telling && reproduced);
+}
 
 /** The worksheet with another inside dimension in m; null where that is no duct. */
 function withDimension(sheet: Worksheet, name: DimensionName, metres: number): Worksheet | null {

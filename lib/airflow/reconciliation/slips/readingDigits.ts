@@ -19,10 +19,12 @@ export const readingDigits: SlipFamily = (one, sheet) => {
   const found: Hypothesis[] = [];
   for (const point of one.points) {
     const [low, high] = neededReading(one, sheet, target, point);
-    forEachDigitVariant(point.written, one.places, (slip, used) => {
+    const visit = (slip: DigitSlip, used: number): void => {
       const counted = one.effective(used);
       if (counted >= low && counted <= high) found.push(digitHypothesis(one, sheet, point, slip, used));
-    });
+    };
+    if (one.isCalibrated) forEachDigitVariant(point.written, one.places, visit);
+    else forEachDigitVariant(point.written, one.places, visit, low, high);
   }
   return found;
 };
