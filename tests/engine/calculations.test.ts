@@ -1,5 +1,4 @@
 import { describe, expect, it } from "vitest";
-import { AirflowInputError } from "@/lib/airflow/errors";
 import { airDensity } from "@/lib/airflow/calculations/airDensity";
 import { airflow, type AirflowInput } from "@/lib/airflow/calculations/airflow";
 import { averageVelocity } from "@/lib/airflow/calculations/averageVelocity";
@@ -13,16 +12,6 @@ const ROUND: Duct = { shape: "round", measured: "inside", diameter: inches(14) }
 const READINGS = { kind: "velocity" as const, unit: "ft/min" as const, lines: [[900, 1000], [1000, 1100]] };
 const PRESSURES = { kind: "velocity_pressure" as const, unit: "in_wg" as const, lines: [[0.06, 0.08, 0.07], [0.065, 0.085, 0.072]] };
 
-function faultsOf(calculate: () => unknown): { path: string; code: string }[] {
-  try {
-    calculate();
-  } catch (error) {
-    if (error instanceof AirflowInputError) return error.faults.map(({ path, code }) => ({ path: path.join("/"), code }));
-    throw error;
-  }
-  return [];
-}
-
 describe("the inside of a duct", () => {
   it("is the outside less board and lining on both sides", () => {
     const { inside, area } = ductArea({ duct: { shape: "rectangular", measured: "outside", width: inches(26), height: inches(18), wall: { thickness: inches(0.5), lining: inches(0.5) } } });
@@ -31,20 +20,6 @@ describe("the inside of a duct", () => {
   });
   it("is what was measured inside, whatever the wall", () => {
     expect(ductArea({ duct: { ...ROUND, wall: { lining: inches(2) } } }).area.value).toBeCloseTo((Math.PI * 49) / 144, 12);
-  });
-
-  it.each<[string, Duct, string, string]>([
-    ["a dimension of 0", { ...ROUND, diameter: inches(0) }, "duct/diameter", "dimension_not_positive"],
-    ["a negative dimension", { ...ROUND, diameter: inches(-3) }, "duct/diameter", "dimension_not_positive"],
-    ["a dimension of a mile", { ...ROUND, diameter: { value: 5280, unit: "ft" } }, "duct/diameter", "dimension_too_large"],
-    ["lining that fills the duct", { shape: "round", measured: "outside", diameter: inches(4), wall: { lining: inches(2) } }, "duct/diameter", "inside_dimension_not_positive"],
-    ["a negative lining", { shape: "round", measured: "outside", diameter: inches(4), wall: { lining: inches(-1) } }, "duct/wall/lining", "negative_wall"],
-    ["a negative board, though it was measured inside", { ...ROUND, wall: { thickness: inches(-1) } }, "duct/wall/thickness", "negative_wall"],
-    ["a flat oval taller than wide", { shape: "flat_oval", measured: "inside", major: inches(10), minor: inches(12) }, "duct/minor", "minor_exceeds_major"],
-  ])("refuses %s", (_, duct, path, code) => expect(faultsOf(() => ductArea({ duct }))).toEqual([{ path, code }]));
-
-  it("names both dimensions when both are wrong", () => {
-    expect(faultsOf(() => ductArea({ duct: { shape: "rectangular", measured: "inside", width: inches(-1), height: inches(0) } }))).toHaveLength(2);
   });
 });
 
@@ -59,22 +34,6 @@ describe("the air in a duct", () => {
     const { density, humidityRatio } = airDensity({ air: { ...base, wetBulb: fahrenheit(64) } });
     expect(airDensity({ air: { ...base, humidityRatio: humidityRatio! } }).density.value).toBeCloseTo(density.value, 14);
   });
-
-  it.each<[string, Air, string, string]>([
-    ["two humidities", { dryBulb: fahrenheit(70), relativeHumidity: percent(50), dewPoint: fahrenheit(50) }, "air/dewPoint", "two_humidities"],
-    ["two pressures", { dryBulb: fahrenheit(70), altitude: { value: 0, unit: "ft" }, barometricPressure: { value: 29.9, unit: "inHg" } }, "air/barometricPressure", "two_pressures"],
-    ["humidity over 100 %", { dryBulb: fahrenheit(70), relativeHumidity: percent(101) }, "air/relativeHumidity", "humidity_out_of_range"],
-    ["a wet bulb above the dry bulb", { dryBulb: fahrenheit(70), wetBulb: fahrenheit(71) }, "air/wetBulb", "wet_bulb_above_dry_bulb"],
-    ["a wet bulb lower than dry air has", { dryBulb: fahrenheit(100), wetBulb: fahrenheit(20) }, "air/wetBulb", "wet_bulb_too_low"],
-    ["a dew point above the dry bulb", { dryBulb: fahrenheit(70), dewPoint: fahrenheit(71) }, "air/dewPoint", "dew_point_above_dry_bulb"],
-    ["more water than the air can hold", { dryBulb: fahrenheit(40), humidityRatio: 0.02 }, "air/humidityRatio", "humidity_over_saturation"],
-    ["steam", { dryBulb: { value: 150, unit: "degC" }, relativeHumidity: percent(100) }, "air/relativeHumidity", "vapour_exceeds_pressure"],
-    ["air hotter than the equations hold", { dryBulb: { value: 250, unit: "degC" } }, "air/dryBulb", "temperature_out_of_range"],
-    ["an altitude in the wrong unit", { dryBulb: fahrenheit(70), altitude: { value: 16_400, unit: "m" } }, "air/altitude", "altitude_out_of_range"],
-    ["a pressure no site has", { dryBulb: fahrenheit(70), barometricPressure: { value: 20, unit: "kPa" } }, "air/barometricPressure", "pressure_out_of_range"],
-    ["a static pressure that bursts the duct", { dryBulb: fahrenheit(70), ductStaticPressure: { value: 40, unit: "kPa" } }, "air/ductStaticPressure", "pressure_out_of_range"],
-    ["a density no air has", { density: { value: 7.5, unit: "lb/ft3" } }, "air/density", "density_out_of_range"],
-  ])("refuses %s", (_, air, path, code) => expect(faultsOf(() => airDensity({ air }))).toEqual([{ path, code }]));
 });
 
 describe("readings", () => {
@@ -89,19 +48,8 @@ describe("readings", () => {
     expect(answer.averageVelocity.value).toBeCloseTo(450, 9);
     expect(answer.checks.find(({ code }) => code === "negative_reading")).toMatchObject({ passed: false, at: [{ line: 1, point: 2 }] });
   });
-  it("below zero are refused where that was asked for", () => {
-    expect(faultsOf(() => averageVelocity({ readings: { ...READINGS, lines: [[900, -50]] }, negativeReadings: "reject" }))).toEqual([{ path: "readings/lines/0/1", code: "negative_reading" }]);
-  });
-  it("beyond reason are all named", () => {
-    expect(faultsOf(() => averageVelocity({ readings: { ...READINGS, lines: [[1e308, 900], [900, -1e9]] } })).map(({ path }) => path)).toEqual(["readings/lines/0/0", "readings/lines/1/1"]);
-  });
-  it("of which there are none cannot be averaged", () => {
-    expect(faultsOf(() => averageVelocity({ readings: { ...READINGS, lines: [[null]] } }))).toEqual([{ path: "readings/lines", code: "no_readings" }]);
-  });
   it("count by their weights", () => {
     expect(averageVelocity({ readings: { ...READINGS, lines: [[900, 1100]], weights: [[3, 1]] } }).averageVelocity.value).toBeCloseTo(950, 9);
-    expect(faultsOf(() => averageVelocity({ readings: { ...READINGS, weights: [[1, 1]] } }))).toEqual([{ path: "readings/weights", code: "weights_do_not_fit" }]);
-    expect(faultsOf(() => averageVelocity({ readings: { ...READINGS, weights: [[1, 1], [1, 0]] } }))).toEqual([{ path: "readings/weights/1/1", code: "weights_do_not_fit" }]);
   });
   it("are corrected by the instrument's calibration first", () => {
     const answer = averageVelocity({ readings: { ...READINGS, lines: [[1000]] }, instrument: { principle: "rotating_vane", calibration: { gain: 1.02, offset: -5 } } });
@@ -123,7 +71,6 @@ describe("airflow against design", () => {
     expect(airflow({ ...measured, air, design: { ...design, basis: "actual" } }).design!.percent).toBeCloseTo(100, 9);
     expect(airflow({ ...measured, air, design: { ...design, basis: "standard" } }).design!.percent).toBeCloseTo(80, 9);
   });
-  it("refuses a design of 0", () => expect(faultsOf(() => airflow({ ...measured, design: { airflow: { value: 0, unit: "ft3/min" } } }))).toEqual([{ path: "design/airflow", code: "design_out_of_range" }]));
 });
 
 describe("what averaging pressures would have given", () => {

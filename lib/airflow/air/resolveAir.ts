@@ -21,8 +21,9 @@ export interface ResolvedAir {
   assumed: Assumption[];
 }
 
-const COLDEST = 233.15;
-const HOTTEST = 473.15;
+/** As a request's −40 °C and 200 °C come to kelvin: −40 + 273.15 is just below 233.15 in binary. */
+const COLDEST = toSi("temperature", { value: -40, unit: "degC" });
+const HOTTEST = toSi("temperature", { value: 200, unit: "degC" });
 const LEAST_DENSITY = 0.2;
 const GREATEST_DENSITY = 2.5;
 
