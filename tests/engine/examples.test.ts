@@ -5,19 +5,21 @@ import { describe, expect, it } from "vitest";
 
 const ENGINE = path.join(import.meta.dirname, "../../lib/airflow");
 
-/** Every `@example expression // value` in the engine's documentation. */
-function documentedExamples(): { file: string; expression: string; value: string }[] {
-  const files = readdirSync(ENGINE, { recursive: true, encoding: "utf8" }).filter((file) => file.endsWith(".ts") && !file.endsWith(".d.ts"));
-  return files.flatMap((file) => {
-    const source = readFileSync(path.join(ENGINE, file), "utf8");
-    return [...source.matchAll(/@example (.+?) \/\/ (.+?)$/gm)].map(([, expression, value]) => ({ file, expression: expression!, value: value!.trim() }));
-  });
-}
+const sources = readdirSync(ENGINE, { recursive: true, encoding: "utf8" })
+  .filter((file) => file.endsWith(".ts") && !file.endsWith(".d.ts"))
+  .map((file) => ({ file, source: readFileSync(path.join(ENGINE, file), "utf8") }));
 
-const examples = documentedExamples();
+/** Every `@example expression // value` in the engine's documentation. */
+const examples = sources.flatMap(({ file, source }) =>
+  [...source.matchAll(/@example (.+?) \/\/ (.+?)(?: \*\/)?$/gm)].map(([, expression, value]) => ({ file, expression: expression!, value: value!.trim() })),
+);
+const exampleTags = sources.reduce((count, { source }) => count + source.split("@example").length - 1, 0);
 
 describe("every example in the engine's documentation", () => {
-  it("is found", () => expect(examples.length).toBeGreaterThan(8));
+  it("is found, and is an expression with its value on one line", () => {
+    expect(examples.length).toBeGreaterThan(8);
+    expect(examples).toHaveLength(exampleTags);
+  });
 
   it.each(examples)("$file: $expression", async ({ file, expression, value }) => {
     const module: Record<string, unknown> = await import(path.join(ENGINE, file));

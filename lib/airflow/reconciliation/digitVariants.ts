@@ -29,7 +29,7 @@ const digitAt = (whole: number, place: number): number => Math.floor(whole / pow
  * @param written Any number of up to 15 digits. @param places Decimal places it is written with, 0 to 12.
  * @param visit Called with each slip and the number it makes; never with the number itself.
  * @param low Numbers below may be passed over. @param high Numbers above may be passed over.
- * @example forEachDigitVariant(1094, 0, visit) // visits ("digit_changed", 1034), ("digits_swapped", 1049), ("digit_dropped", 194) …
+ * @example ((made: number[]) => { forEachDigitVariant(12, 0, (slip, used) => slip === "digits_swapped" && made.push(used)); return made; })([]) // [21]
  */
 export function forEachDigitVariant(written: number, places: number, visit: (slip: DigitSlip, used: number) => void, low = -Infinity, high = Infinity): void {
   const whole = Math.round(Math.abs(written) * power(places));
