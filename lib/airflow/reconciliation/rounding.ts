@@ -31,4 +31,5 @@ export const significantStep = (value: number, digits: number): number => 10 ** 
 /** Digits before the decimal point; 0 or fewer for a number below 1. */
 const digitsOf = (value: number): number => Math.floor(Math.log10(Math.abs(value))) + 1;
 
-export const roundTo = (value: number, step: number | null): number => (step === null ? value : Math.round(value / step) * step);
+/** Half a step goes up, also where floating point puts it a hair below. */
+export const roundTo = (value: number, step: number | null): number => (step === null ? value : Math.round(value / step + 1e-9) * step);

@@ -1,8 +1,8 @@
-import { ANSWER_UNITS, UNITS, type AreaUnit } from "../../units/units";
+import { ANSWER_UNITS, UNITS } from "../../units/units";
 import type { Case } from "../case";
 import { methodSlip, type Hypothesis } from "../hypothesis";
 import type { ReportedFigure } from "../reported";
-import { NOTHING_CARRIED, reproduce, type Carried } from "../reproduce";
+import { ALL_CARRIED, NOTHING_CARRIED, reproduce, type Carried } from "../reproduce";
 import { roundTo, significantStep } from "../rounding";
 import { DIMENSIONS, type FigureName, type Slip } from "../slip";
 import { areaOn, averageOn, withVelocitiesScaled, type Worksheet } from "../worksheet";
@@ -18,13 +18,13 @@ const STANDARD_AIR_WITHIN = 0.005;
 
 /**
  * The ways of working that round before the end. Nearest at hand: the reported total, average or area was used for the next
- * figure. Then: an average or area that was not reported, rounded to three or four digits; velocities rounded point by point;
+ * figure. Then: an average or area that was not reported, rounded to three to five digits; velocities rounded point by point;
  * a rounded constant.
  */
 export const earlyRounding = (one: Case, sheet: Worksheet): RoundedWorking[] => [
   ...reportedGoneOnFrom(one, sheet),
-  ...unreportedRounded(one, sheet).map((hypothesis) => ({ ...hypothesis, carried: NOTHING_CARRIED })),
-  ...pointsRounded(one, sheet).map((hypothesis) => ({ ...hypothesis, carried: NOTHING_CARRIED })),
+  ...unreportedRounded(one, sheet).map((hypothesis) => ({ ...hypothesis, carried: ALL_CARRIED })),
+  ...pointsRounded(one, sheet).map((hypothesis) => ({ ...hypothesis, carried: ALL_CARRIED })),
 ];
 
 /** Early rounding that a slip may come on top of. Figures that were reported are gone on from in any case. */
@@ -43,22 +43,30 @@ const roundedSlip = ({ figure, value, unit }: ReportedFigure, read: number): Sli
   slip: "rounded_early", figure, read, used: value, unit, detail: `The ${figure} was rounded to ${value} before it was used further.`,
 });
 
-/** Average or area rounded to three or four digits on the way, where the report does not show them. */
+/** Digits that an average or area is rounded to on the way; both at once only finely, or rounding could make up for anything. */
+const DIGITS_ALONE = [5, 4, 3];
+const DIGITS_TOGETHER = [5, 4];
+
+/** Average or area, or both, rounded on the way, where the report does not show them. */
 function unreportedRounded(one: Case, sheet: Worksheet): Hypothesis[] {
   if (!one.figures.airflow || !sheet.inside) return [];
-  const suppose = (figure: "average" | "area", si: number, unit: string, factor: number): Hypothesis[] =>
-    [4, 3].map((digits) => {
-      const step = significantStep(si / factor, digits) * factor;
-      const used = roundTo(si, step) / factor;
-      const slip: Slip = { slip: "rounded_early", figure, read: si / factor, used, unit, detail: `The ${figure} was rounded to ${used.toPrecision(digits)} ${unit} before it was used further.` };
-      return { slips: [slip], sheet: { ...sheet, [figure === "average" ? "averageStep" : "areaStep"]: step } };
-    });
-  const areaUnit = ANSWER_UNITS[one.system].area;
-  const average = averageOn(one, sheet);
-  return [
-    ...(one.figures.average || !(average > 0) ? [] : suppose("average", average, one.velocityUnit, UNITS.velocity[one.velocityUnit].factor)),
-    ...(one.figures.area ? [] : suppose("area", areaOn(one, sheet)!, areaUnit, UNITS.area[areaUnit as AreaUnit].factor)),
-  ];
+  const averages = (on: Worksheet, digits: readonly number[]): Hypothesis[] => {
+    const average = averageOn(one, on);
+    return one.figures.average || !(average > 0) ? [] : digits.map((kept) => roundedTo(on, "average", average, one.velocityUnit, UNITS.velocity[one.velocityUnit].factor, kept));
+  };
+  const areas = (on: Worksheet, digits: readonly number[]): Hypothesis[] => {
+    const unit = ANSWER_UNITS[one.system].area;
+    return one.figures.area ? [] : digits.map((kept) => roundedTo(on, "area", areaOn(one, on)!, unit, UNITS.area[unit].factor, kept));
+  };
+  const both = averages(sheet, DIGITS_TOGETHER).flatMap((first) => areas(first.sheet, DIGITS_TOGETHER).map(({ slips, sheet: changed }) => ({ slips: [...first.slips, ...slips], sheet: changed })));
+  return [...averages(sheet, DIGITS_ALONE), ...areas(sheet, DIGITS_ALONE), ...both];
+}
+
+function roundedTo(sheet: Worksheet, figure: "average" | "area", si: number, unit: string, factor: number, digits: number): Hypothesis {
+  const step = significantStep(si / factor, digits) * factor;
+  const used = Number((roundTo(si, step) / factor).toPrecision(digits));
+  const slip: Slip = { slip: "rounded_early", figure, read: si / factor, used, unit, detail: `The ${figure} was rounded to ${used} ${unit} before it was used further.` };
+  return { slips: [slip], sheet: { ...sheet, [figure === "average" ? "averageStep" : "areaStep"]: step } };
 }
 
 /** From velocity pressures: velocities rounded point by point to the unit they are written in, a rounded constant, or both. */
