@@ -1,6 +1,5 @@
 import { afterAll, describe, expect, it } from "vitest";
 import { possibleSlips } from "@/lib/airflow/reconciliation/possibleSlips";
-import { possibleSlipCheck } from "@/lib/airflow/reconciliation/possibleSlipCheck";
 import { studentQuantile } from "@/lib/airflow/reconciliation/profileFit";
 
 const STEADY = [
@@ -44,13 +43,6 @@ describe("a possible slip", () => {
   it("is not told from a single line", () => expect(possibleSlips([[812, 934, 101, 1004, 921, 806]], "velocity")).toEqual([]));
   it("is not told where lines differ in length", () => expect(possibleSlips([[812, 934, 101], [804, 921, 806, 799], [812, 934, 900]], "velocity")).toEqual([]));
   it("leaves out what was not read", () => expect(possibleSlips(withReading(2, 3, null), "velocity")).toEqual([]));
-
-  it("makes a check that names the reading", () => {
-    const check = possibleSlipCheck({ kind: "velocity", unit: "ft/min", lines: withReading(2, 3, 1749) });
-    expect(check).toMatchObject({ code: "possible_slip", passed: false, at: [{ line: 2, point: 3 }] });
-    expect(check.detail).toContain("Line 2, point 3 reads 1749");
-    expect(possibleSlipCheck({ kind: "velocity", unit: "ft/min", lines: STEADY })).toMatchObject({ passed: true, compared: { value: 0 } });
-  });
 });
 
 describe("Student's t, two-sided 0.05 from the normal quantile 1.95996, against printed tables (from memory)", () => {
