@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { humidAirDensity } from "@/lib/airflow/air/humidAir";
 import { standardAtmospherePressure } from "@/lib/airflow/air/standardAtmosphere";
 import { fromSi, toSi } from "@/lib/airflow/units/convert";
-import { published, reference, relative } from "./values";
+import { published, reference, relative, titleOf } from "./values";
 
 const block = reference["1_standard_atmosphere"];
 const feet = (value: number): number => toSi("length", { value, unit: "ft" });
@@ -32,7 +32,7 @@ describe("published values of the standard atmosphere", () => {
     ["P, rho, T at 2000 m (geometric)", 2000, 0.5, 5e-5],
     ["P, rho, T at 4000 m (geometric)", 4000, 5, 5e-6 + 0.81935 * 4e-5],
     ["P, rho, T at 0 m", 0, 5, 5e-5],
-  ])("%s, to the printed digits", (name, altitude, halfDigit, halfDensityDigit) => {
+  ])(`%s, to the printed digits (read: ${titleOf("PDAS")})`, (name, altitude, halfDigit, halfDensityDigit) => {
     const { value: [pressure, density, temperature] } = published<[number, number, number]>(block.published_checks, name);
     expect(Math.abs(standardAtmospherePressure(altitude) - pressure)).toBeLessThanOrEqual(halfDigit);
     expect(Math.abs(humidAirDensity(temperature, 0, standardAtmospherePressure(altitude)) - density)).toBeLessThanOrEqual(halfDensityDigit);
