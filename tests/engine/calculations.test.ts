@@ -130,6 +130,17 @@ describe("checks", () => {
     const failed = airflow({ duct: ROUND, readings: PRESSURES, air: { dryBulb: fahrenheit(70), relativeHumidity: percent(40), altitude: { value: 0, unit: "ft" } } }).checks.filter(({ passed }) => !passed);
     expect(failed).toEqual([]);
   });
+  it("count the points against the layout's rule, and the budget grows by what is missing", () => {
+    const duct: Duct = { shape: "rectangular", measured: "inside", width: inches(24), height: inches(16) };
+    const read = (count: number, layout: AirflowInput["layout"]) => airflow({ duct, layout, readings: { ...READINGS, lines: [Array.from({ length: count }, () => 900)] } });
+    const checkOf = (count: number, layout: AirflowInput["layout"]) => read(count, layout).checks.find(({ code }) => code === "points_below_minimum");
+    const layoutPercent = (count: number) => read(count, "log_tchebycheff").uncertainty.budget.find(({ name }) => name === "layout")!.percent;
+    expect(checkOf(25, "log_tchebycheff")).toMatchObject({ passed: true, compared: { value: 25, limit: 25 } });
+    expect(checkOf(20, "log_tchebycheff")).toMatchObject({ passed: false, compared: { value: 20, limit: 25 } });
+    expect([checkOf(20, "custom"), checkOf(20, undefined)]).toEqual([undefined, undefined]);
+    expect([layoutPercent(30), layoutPercent(25), layoutPercent(20)]).toEqual([1, 1, 1.25]);
+    expect(() => read(20, "log_linear")).toThrow(/not for rectangular ducts/);
+  });
   it("see an uneven profile by its pressures", () => expect(codeOf({ readings: { ...PRESSURES, lines: [[0.1, 0.1, 0.009, 0.009]] } }, "uniformity")).toMatchObject({ passed: false, severity: "failure", compared: { value: 50, limit: 75 } }));
   it("see air too slow for a pitot-static probe", () => expect(codeOf({ readings: { ...PRESSURES, lines: [[0.01, 0.01]] } }, "low_velocity")).toMatchObject({ passed: false }));
   it("see one half faster than the other", () => expect(codeOf({ readings: { ...PRESSURES, lines: [[0.03, 0.03, 0.1, 0.1]] } }, "profile_asymmetry")).toMatchObject({ passed: false }));

@@ -3,6 +3,7 @@ import type { Check } from "../checks/check";
 import { runChecks } from "../checks/runChecks";
 import { area } from "../duct/area";
 import { insideDuct } from "../duct/insideDuct";
+import { minimumPoints } from "../layout/minimumPoints";
 import type { Air, AnswerOptions, Design, Duct, Instrument, LayoutRule, NegativeReadings, Probe, Readings, Site, StandardAirName, UncertaintyOptions } from "../types";
 import { uncertaintyBudget, type Budget } from "../uncertainty/budget";
 import { inAnswerUnits } from "../units/convert";
@@ -52,7 +53,7 @@ interface Flow {
  * Airflow of a traverse: actual, standard and mass, with checks, uncertainty and the verdict against design.
  * @param input As the API takes it.
  * @returns As the API gives it, in the units asked for.
- * @throws {AirflowInputError} A duct, air or readings that cannot be.
+ * @throws {AirflowInputError} A duct, air or readings that cannot be, or a layout that is not for ducts of that shape.
  * @example airflow({ duct: { shape: "rectangular", measured: "inside", width: { value: 0.5, unit: "m" }, height: { value: 0.4, unit: "m" } }, readings: { kind: "velocity", unit: "m/s", lines: [[4, 6]] }, units: "si" }).airflow.actual // { value: 1000, unit: "L/s" }
  */
 export function airflow(input: AirflowInput): AirflowAnswer {
@@ -60,13 +61,14 @@ export function airflow(input: AirflowInput): AirflowAnswer {
   const { system, working, standardDensity } = options;
   const { readings, probe, instrument, site, layout } = input;
   const inside = insideDuct(input.duct);
+  const leastPoints = layout ? minimumPoints(inside, layout, site) : null;
   const air = resolveAir(input.air, standardDensity);
   const traverse = traverseVelocity(readings, air, standardDensity, input);
   const ductArea = area(inside);
   const actual = ductArea * traverse.average;
   const flow: Flow = { area: ductArea, averageVelocity: traverse.average, actual, mass: air.density * actual, standard: (air.density * actual) / standardDensity };
   const budgetOf = (basis: "actual" | "standard"): Budget =>
-    uncertaintyBudget({ readings, traverse, air, inside, instrument, site, layout, airWasGiven: input.air !== undefined, basis, minimumPoints: null, options: input.uncertainty ?? {} });
+    uncertaintyBudget({ readings, traverse, air, inside, instrument, site, layout, airWasGiven: input.air !== undefined, basis, minimumPoints: leastPoints, options: input.uncertainty ?? {} });
   const budget = budgetOf("actual");
   const designBudget = input.design?.basis === "standard" ? budgetOf("standard") : budget;
   if (working) {
@@ -86,7 +88,7 @@ export function airflow(input: AirflowInput): AirflowAnswer {
     ...velocityAnswer(traverse, system),
     area: inAnswerUnits("area", flow.area, system),
     air: airAnswer(air, options),
-    checks: runChecks({ readings, traverse, air, system, instrument, probe, inside, site, layout }),
+    checks: runChecks({ readings, traverse, air, system, instrument, probe, inside, site, layout, minimumPoints: leastPoints }),
     uncertainty: uncertaintyAnswer(budget, flow.actual, system),
     design: input.design ? designAnswer(input.design, flow, designBudget, options) : null,
     ...workingPart(working),

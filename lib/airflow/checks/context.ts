@@ -16,6 +16,8 @@ export interface CheckContext {
   inside?: InsideDuct;
   site?: Site;
   layout?: LayoutRule;
+  /** Least number of points that the layout's rule asks for; null where it has none. */
+  minimumPoints?: number | null;
 }
 
 /** A check that does not apply, or for which nothing is known, gives null. */
