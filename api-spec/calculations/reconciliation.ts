@@ -91,7 +91,7 @@ export const reconciliation = defineOperation({
       conclusion: z.enum(["agrees", "explained", "explained_by_two_slips", "partly_explained", "unexplained"]),
       detail: z.string().describe("The conclusion in words."),
       explanations: z.array(explanation).describe("Best first, at most 100."),
-      omitted: z.int().describe("Further explanations of the last rank, not listed."),
+      omitted: z.int().describe("Further explanations that were found and are not listed; of each kind no more than 2,000 are looked for."),
       working,
     })
     .meta({ id: "ReconciliationAnswer" }),

@@ -48,7 +48,7 @@ export interface ReconciliationAnswer {
   /** The conclusion in words. */
   detail: string;
   explanations: ExplanationAnswer[];
-  /** Explanations of the last rank told that are left out, for there are too many. */
+  /** Further explanations that were found and are left out, for there are too many; beyond two thousand none is looked for. */
   omitted: number;
   working?: WorkingStep[];
 }
@@ -70,7 +70,7 @@ export function reconciliation(input: ReconciliationInput): ReconciliationAnswer
     figures,
     conclusion: explained.conclusion,
     detail: inWords(explained),
-    explanations: ranked(explained.findings).slice(0, MOST_EXPLANATIONS),
+    explanations: ranked(explained.findings),
     omitted: Math.max(0, explained.findings.length - MOST_EXPLANATIONS),
     ...workingPart(options.working),
   };
@@ -80,10 +80,10 @@ const figureAnswer = ({ figure, value, unit, rounding }: ReportedFigure, { value
   figure, reported: value, recomputed, difference: value - recomputed, unit, rounding, withinRounding: reproduced,
 });
 
-/** Findings come best first; those that explain as much by as few assumptions share a rank. */
+/** Findings come best first; those that explain as much by as few assumptions share a rank. The best hundred are told. */
 function ranked(findings: readonly Finding[]): ExplanationAnswer[] {
   const merits = findings.map((finding) => `${finding.explains.length} ${assumptionsOf(finding)}`);
-  return findings.map((finding, index) => {
+  return findings.slice(0, MOST_EXPLANATIONS).map((finding, index) => {
     const { slips, explains, reproductions } = finding;
     return {
       ...slips.at(-1)!,
@@ -97,7 +97,7 @@ function ranked(findings: readonly Finding[]): ExplanationAnswer[] {
   });
 }
 
-function inWords({ conclusion, findings, tooManyPairs }: Explained): string {
+function inWords({ conclusion, findings, pairs }: Explained): string {
   switch (conclusion) {
     case "agrees":
       return "Every reported figure agrees with the readings within the rounding of its digits.";
@@ -106,11 +106,18 @@ function inWords({ conclusion, findings, tooManyPairs }: Explained): string {
     case "explained_by_two_slips":
       return `No single slip accounts for everything that disagrees; ${findings.length === 1 ? "one pair of slips does" : `${findings.length} pairs of slips do`}.`;
     case "partly_explained":
-      return "No slip or pair of slips accounts for everything that disagrees. What is listed explains a part of it.";
+      return `${NOT_EXPLAINED[pairs]} What is listed explains a part of it.`;
     case "unexplained":
-      return tooManyPairs ? "No single slip accounts for what disagrees, and so many pairs of slips would that none of them tells anything. Compare the sheet with the instrument's memory, or read again." : "No slip or pair of slips known here accounts for what disagrees. Compare the sheet with the instrument's memory, or read again.";
+      return `${NOT_EXPLAINED[pairs]} Compare the sheet with the instrument's memory, or read again.`;
   }
 }
+
+const NOT_EXPLAINED: Record<Explained["pairs"], string> = {
+  not_needed: "",
+  not_tried: "No single slip accounts for everything that disagrees; pairs are not tried for so many readings.",
+  tried: "No slip or pair of slips known here accounts for everything that disagrees.",
+  too_many: "No single slip accounts for everything that disagrees, and so many pairs of slips would that none of them tells anything.",
+};
 
 function addReconciliationWorking(one: Case, input: ReconciliationInput, figures: readonly FigureAnswer[], options: ResolvedOptions): void {
   const { working, system } = options;

@@ -16,12 +16,15 @@ export interface Explained {
   conclusion: Conclusion;
   /** Best first: all of what disagrees before part of it, fewer slips before more. */
   findings: Finding[];
-  /** Whether so many pairs of slips fit that none of them tells anything. */
-  tooManyPairs: boolean;
+  /** Whether pairs of slips were looked for, and whether so many fit that none of them tells anything. */
+  pairs: "not_needed" | "not_tried" | "tried" | "too_many";
 }
 
 /** So many pairs in one figure are told at the most; where more fit, two numbers can be found to explain anything. */
 const MOST_PAIRS = 20;
+
+/** Two slips are tried for no more readings than this: more than any traverse has, and each pair costs a search through all of them. */
+const MOST_POINTS_FOR_PAIRS = 200;
 
 /**
  * Looks for the slips that explain a report, by as few assumptions as will do: none if rounding accounts for it, then one slip,
@@ -30,23 +33,28 @@ const MOST_PAIRS = 20;
 export function explain(one: Case): Explained {
   const right = rightWorksheet(one);
   const exact = reproduce(one, right, NOTHING_CARRIED);
-  if (exact.every(({ reproduced }) => reproduced)) return { conclusion: "agrees", findings: [], tooManyPairs: false };
+  if (exact.every(({ reproduced }) => reproduced)) return { conclusion: "agrees", findings: [], pairs: "not_needed" };
   const judge = judgeOf(one, right);
 
   const rounded = fewestSlips(earlyRounding(one, right).map((working) => judge(working, working.carried)).filter(isFull));
-  if (rounded.length > 0) return { conclusion: "explained", findings: distinct(rounded), tooManyPairs: false };
+  if (rounded.length > 0) return { conclusion: "explained", findings: distinct(rounded), pairs: "not_needed" };
 
   const singles = judged(judge, singleSlips(one, right));
   const full = singles.filter(isFull);
-  if (full.length > 0) return { conclusion: "explained", findings: distinct(full), tooManyPairs: false };
+  if (full.length > 0) return { conclusion: "explained", findings: distinct(full), pairs: "not_needed" };
 
-  const onRounding = otherEarlyRounding(one, right).flatMap((rounding) => judged(judge, onTopOf(rounding, singleSlips(one, rounding.sheet)))).filter(isFull);
-  if (onRounding.length > 0) return { conclusion: "explained", findings: distinct(onRounding), tooManyPairs: false };
-
-  const { pairs, tooMany } = pairsOfSlips(one, right, judge, distinct(singles));
-  if (pairs.length > 0) return { conclusion: "explained_by_two_slips", findings: pairs, tooManyPairs: false };
   const partial = distinct(singles);
-  return { conclusion: partial.length > 0 ? "partly_explained" : "unexplained", findings: partial, tooManyPairs: tooMany };
+  const two = one.points.length <= MOST_POINTS_FOR_PAIRS ? twoSlips(one, right, judge, partial) : null;
+  if (two && two.findings.length > 0) return two;
+  return { conclusion: partial.length > 0 ? "partly_explained" : "unexplained", findings: partial, pairs: two?.pairs ?? "not_tried" };
+}
+
+/** One slip on top of early rounding, or else two slips. */
+function twoSlips(one: Case, right: Worksheet, judge: Judge, singles: readonly Finding[]): Explained {
+  const onRounding = otherEarlyRounding(one, right).flatMap((rounding) => judged(judge, onTopOf(rounding, singleSlips(one, rounding.sheet)))).filter(isFull);
+  if (onRounding.length > 0) return { conclusion: "explained", findings: distinct(onRounding), pairs: "not_needed" };
+  const { pairs, tooMany } = pairsOfSlips(one, right, judge, singles);
+  return { conclusion: "explained_by_two_slips", findings: pairs, pairs: tooMany ? "too_many" : "tried" };
 }
 
 const isFull = (finding: Finding | null): finding is Finding => finding?.full === true;

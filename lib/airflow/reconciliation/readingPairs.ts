@@ -2,7 +2,7 @@ import type { Case, CasePoint } from "./case";
 import { forEachDigitVariant, type DigitSlip } from "./digitVariants";
 import type { Hypothesis } from "./hypothesis";
 import { readingTarget } from "./readingTarget";
-import { digitHypothesis } from "./slips/readingDigits";
+import { digitHypothesis, MOST_PLACES } from "./slips/readingDigits";
 import { velocityOn, type Worksheet } from "./worksheet";
 
 interface Variant {
@@ -19,7 +19,7 @@ interface Variant {
  */
 export function readingPairs(one: Case, sheet: Worksheet, most: number): Hypothesis[] {
   const target = readingTarget(one, sheet);
-  if (!target?.total) return [];
+  if (!target?.total || one.places > MOST_PLACES) return [];
   const needed = [target.low - target.sum, target.high - target.sum] as const;
   const width = needed[1] - needed[0];
   const before = new Map<number, Variant[]>();

@@ -12,12 +12,18 @@ const WORDS: Record<DigitSlip, string> = {
   decimal_moved: "with the decimal point moved",
 };
 
+/** Nobody writes a reading with more decimal places; what has more was computed, and its digits were never copied. */
+export const MOST_PLACES = 6;
+/** Where so many slips fit, the figures tell nothing of which it was, and no more are looked for. */
+const MOST_FOUND = 2_000;
+
 /** A reading used with a slip in its digits. For each reading the report leaves a narrow range; only slips that lead there are looked at. */
 export const readingDigits: SlipFamily = (one, sheet) => {
   const target = readingTarget(one, sheet);
-  if (!target) return [];
+  if (!target || one.places > MOST_PLACES) return [];
   const found: Hypothesis[] = [];
   for (const point of one.points) {
+    if (found.length >= MOST_FOUND) break;
     const [low, high] = neededReading(one, sheet, target, point);
     const visit = (slip: DigitSlip, used: number): void => {
       const counted = one.effective(used);
