@@ -5,9 +5,13 @@ import { batch } from "./calculations/batch";
 import { averageVelocity } from "./calculations/averageVelocity";
 import { densityCorrection } from "./calculations/densityCorrection";
 import { ductArea } from "./calculations/ductArea";
+import { fanAdjustment } from "./calculations/fanAdjustment";
+import { reconciliation } from "./calculations/reconciliation";
+import { systemBalance } from "./calculations/systemBalance";
+import { traversePlan } from "./calculations/traversePlan";
 
 /** Every operation of the public API, in the order the reference shows them. */
-export const OPERATIONS: OperationDefinition[] = [ductArea, airDensity, densityCorrection, averageVelocity, airflow, batch];
+export const OPERATIONS: OperationDefinition[] = [ductArea, traversePlan, airDensity, densityCorrection, averageVelocity, airflow, reconciliation, fanAdjustment, systemBalance, batch];
 
 /** Groups of operations, with what the reference says of each. */
 export const TAGS: Record<string, string> = {

@@ -4,16 +4,16 @@ import { standardAirName } from "./shapes";
 
 /** The parts that several answers have. */
 
-const anyQuantity = z.strictObject({ value: z.number(), unit: z.string() });
+const anyQuantity = z.strictObject({ value: z.number().describe("The number, not rounded."), unit: z.string().describe("Its unit; `1` for a bare ratio.") });
 
 export const working = z
   .array(
     z
       .strictObject({
         step: z.string().describe("What the step finds."),
-        equation: z.string(),
+        equation: z.string().describe("In the field's symbols."),
         inputs: z.record(z.string(), anyQuantity).describe("What went in, by symbol."),
-        value: anyQuantity,
+        value: anyQuantity.describe("What comes out."),
         source: z.string().describe("Standard, handbook or definition."),
       })
       .meta({ id: "WorkingStep", description: "One step of the arithmetic, complete enough to be redone by hand." }),
@@ -46,19 +46,26 @@ export const check = z
     code: z.enum([
       "points_below_minimum", "uniformity", "negative_reading", "low_velocity", "site_disturbance", "profile_asymmetry", "possible_slip",
       "density_assumed", "probe_blockage", "compressibility", "near_wall", "duct_below_minimum",
-    ]),
-    passed: z.boolean(),
+    ]).describe("Stable code of the check."),
+    passed: z.boolean().describe("Whether what was found is within the limit."),
     severity: z.enum(["information", "caution", "failure"]).describe("How much it weighs when it is not passed."),
-    detail: z.string(),
-    compared: z.strictObject({ quantity: z.string(), value: z.number().nullable(), limit: z.number().nullable(), unit: z.string().nullable() }),
-    source: z.string(),
+    detail: z.string().describe("What was found and, where it is not passed, what to do about it."),
+    compared: z
+      .strictObject({
+        quantity: z.string().describe("What was compared, in words."),
+        value: z.number().nullable().describe("What was found."),
+        limit: z.number().nullable().describe("What it was compared with."),
+        unit: z.string().nullable().describe("Unit of both; null for counts and ratios."),
+      })
+      .describe("The comparison, so that it can be repeated."),
+    source: z.string().describe("Where the limit comes from, and how surely."),
     at: z.array(z.strictObject({ line: z.int(), point: z.int() })).optional().describe("The readings concerned, counted from 1."),
   })
   .meta({ id: "Check", description: "A check of the plan or the result, with what was compared." });
 
 /** What every answer about a traverse says of its velocities. */
 export const velocityAnswer = {
-  averageVelocity: velocity,
+  averageVelocity: velocity.describe("Mean of the velocities at the points."),
   points: z.array(z.strictObject({ line: z.int(), point: z.int(), velocity })).describe("The actual velocity at each point that was read."),
   statistics: z
     .strictObject({
@@ -80,26 +87,26 @@ export const uncertaintyAnswer = z
         .strictObject({
           name: z.enum(["instrument", "fluctuation", "layout", "site", "area", "density", "rounding"]),
           percent: z.number().describe("Relative standard uncertainty of the airflow from this influence, in percent."),
-          origin: z.enum(["given", "default"]),
-          detail: z.string(),
+          origin: z.enum(["given", "default"]).describe("Whether the request gave it; a default is engineering judgement."),
+          detail: z.string().describe("What it was taken from."),
         })
         .meta({ id: "Influence", description: "One row of the uncertainty budget." }),
     ),
-    combinedPercent: z.number(),
-    coverageFactor: z.number(),
-    expandedPercent: z.number(),
+    combinedPercent: z.number().describe("The rows in quadrature."),
+    coverageFactor: z.number().describe("k."),
+    expandedPercent: z.number().describe("k times the combined uncertainty, in percent of the airflow."),
     expanded: airflow.describe("Of the actual airflow."),
-    note: z.string(),
+    note: z.string().describe("How the figure was made."),
   })
   .meta({ id: "Uncertainty", description: "How sure the airflow is, by the GUM." });
 
 export const designAnswer = z
   .strictObject({
-    airflow,
-    basis: z.enum(["actual", "standard"]),
+    airflow: airflow.describe("The design airflow."),
+    basis: z.enum(["actual", "standard"]).describe("Which airflow was compared."),
     percent: z.number().describe("Measured over design, in percent."),
     difference: airflow.describe("Measured less design."),
-    tolerancePercent: z.number(),
+    tolerancePercent: z.number().describe("Allowed difference, in percent of the design airflow."),
     expandedUncertainty: airflow.describe("Of the measured airflow on the design's basis."),
     verdict: z.enum(["within", "outside", "undecided"]).describe("`undecided`: the measurement cannot tell."),
   })

@@ -17,7 +17,13 @@ export const densityCorrection = defineOperation({
     "From what the instrument indicated, assuming one air (`from`), to what was there in another (`to`). The instrument's principle decides: √(ρ₀/ρ) where it senses differential pressure, ρ₀/ρ where it is thermal, 1 for a rotating vane or an instrument that already compensates.",
   body: z.strictObject({ quantity: velocityOrAirflow, principle: instrumentPrinciple, from: airOrStandard, to: airOrStandard, ...answerOptions }),
   answer: z
-    .strictObject({ corrected: z.union([velocity, airflow]), factor: z.number(), fromDensity: density, toDensity: density, working })
+    .strictObject({
+      corrected: z.union([velocity, airflow]).describe("The velocity or airflow that was there."),
+      factor: z.number().describe("What the indication was multiplied by."),
+      fromDensity: density.describe("Of the air that the instrument assumed."),
+      toDensity: density.describe("Of the air that was there."),
+      working,
+    })
     .meta({ id: "DensityCorrectionAnswer" }),
   problems: ["impossible-input"],
   examples: [

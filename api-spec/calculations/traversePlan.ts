@@ -107,7 +107,7 @@ export const traversePlan = defineOperation({
         rules: z.array(siteRule),
       }),
       checks: z.array(planCheck),
-      cautions: z.array(z.string()).describe("What to heed before drilling and after."),
+      cautions: z.array(z.string()).readonly().describe("What to heed before drilling and after."),
       working,
     })
     .meta({ id: "TraversePlanAnswer" }),
