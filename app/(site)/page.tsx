@@ -5,6 +5,7 @@ import { SectionHead } from "../_components/layout/SectionHead";
 
 const NOTES = [
   { head: "The working is in the answer.", text: "Equation, inputs, value and source of every step. A reviewer can redo it by hand." },
+  { head: "Slips are named.", text: "A digit misread, two digits swapped, a reading left out, outside dimensions used, pressures averaged: reconciliation says which one explains the figure." },
   { head: "How sure is part of the figure.", text: "An uncertainty budget by the GUM, and a verdict against design that says undecided when the measurement cannot tell." },
   { head: "The instrument decides the correction.", text: "Differential-pressure, thermal and vane instruments each get their own." },
   { head: "One definition.", text: "The schema that checks a request also makes the reference, the OpenAPI document and its examples." },

@@ -11,7 +11,7 @@ export default function ChangelogPage() {
       <div className="prose">
         <SectionHead>1 December 2026, version 1.0.0</SectionHead>
         <ul>
-          <li>Calculations: duct area, air density, density correction, average velocity, airflow, and batches of them.</li>
+          <li>Calculations: duct area, traverse plan, air density, density correction, average velocity, airflow, reconciliation, fan adjustment, system balance, and batches of them.</li>
           <li>Keys with scopes, environments, expiry, networks, rotation and revocation.</li>
           <li>Usage by day, operation and status.</li>
         </ul>
