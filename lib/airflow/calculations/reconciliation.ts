@@ -104,7 +104,7 @@ function inWords({ conclusion, findings, pairs }: Explained): string {
     case "explained":
       return findings.length === 1 ? "One explanation accounts for everything that disagrees." : `${findings.length} explanations account for everything that disagrees; the figures cannot tell those of one rank apart.`;
     case "explained_by_two_slips":
-      return `No single slip accounts for everything that disagrees; ${findings.length === 1 ? "one pair of slips does" : `${findings.length} pairs of slips do`}.`;
+      return `No single slip accounts for everything that disagrees; ${findings.length === 1 ? "one pair of slips does" : `${findings.length} pairs of slips do`}.${pairs === "perhaps_chance" ? " Neither slip of a pair explains anything by itself, so this may be chance." : ""}`;
     case "partly_explained":
       return `${NOT_EXPLAINED[pairs]} What is listed explains a part of it.`;
     case "unexplained":
@@ -112,10 +112,9 @@ function inWords({ conclusion, findings, pairs }: Explained): string {
   }
 }
 
-const NOT_EXPLAINED: Record<Explained["pairs"], string> = {
-  not_needed: "",
+const NOT_EXPLAINED: Partial<Record<Explained["pairs"], string>> = {
   not_tried: "No single slip accounts for everything that disagrees; pairs are not tried for so many readings.",
-  tried: "No slip or pair of slips known here accounts for everything that disagrees.",
+  none: "No slip or pair of slips known here accounts for everything that disagrees.",
   too_many: "No single slip accounts for everything that disagrees, and so many pairs of slips would that none of them tells anything.",
 };
 

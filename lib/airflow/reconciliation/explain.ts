@@ -16,12 +16,18 @@ export interface Explained {
   conclusion: Conclusion;
   /** Best first: all of what disagrees before part of it, fewer slips before more. */
   findings: Finding[];
-  /** Whether pairs of slips were looked for, and whether so many fit that none of them tells anything. */
-  pairs: "not_needed" | "not_tried" | "tried" | "too_many";
+  /**
+   * Whether pairs of slips were looked for, and what they are worth: `with_evidence` where one of the two explains a part by
+   * itself, `perhaps_chance` where neither does, `too_many` where so many fit that none of them tells anything.
+   */
+  pairs: "not_needed" | "not_tried" | "none" | "with_evidence" | "perhaps_chance" | "too_many";
 }
 
 /** So many pairs in one figure are told at the most; where more fit, two numbers can be found to explain anything. */
-const MOST_PAIRS = 20;
+const MOST_PAIRS = 5;
+
+/** So many slips in readings are tried together with one in a dimension. */
+const MOST_UNDER_DIMENSIONS = 50;
 
 /** Two slips are tried for no more readings than this: more than any traverse has, and each pair costs a search through all of them. */
 const MOST_POINTS_FOR_PAIRS = 200;
@@ -53,8 +59,7 @@ export function explain(one: Case): Explained {
 function twoSlips(one: Case, right: Worksheet, judge: Judge, singles: readonly Finding[]): Explained {
   const onRounding = otherEarlyRounding(one, right).flatMap((rounding) => judged(judge, onTopOf(rounding, singleSlips(one, rounding.sheet)))).filter(isFull);
   if (onRounding.length > 0) return { conclusion: "explained", findings: distinct(onRounding), pairs: "not_needed" };
-  const { pairs, tooMany } = pairsOfSlips(one, right, judge, singles);
-  return { conclusion: "explained_by_two_slips", findings: pairs, pairs: tooMany ? "too_many" : "tried" };
+  return { conclusion: "explained_by_two_slips", ...pairsOfSlips(one, right, judge, singles) };
 }
 
 const isFull = (finding: Finding | null): finding is Finding => finding?.full === true;
@@ -67,7 +72,7 @@ const onTopOf = (first: Hypothesis, seconds: readonly Hypothesis[]): Hypothesis[
  * Two slips that explain everything. Where one of them already explains a part by itself, it has evidence of its own, and
  * only such pairs count; otherwise two slips in one figure are tried.
  */
-function pairsOfSlips(one: Case, right: Worksheet, judge: Judge, singles: readonly Finding[]): { pairs: Finding[]; tooMany: boolean } {
+function pairsOfSlips(one: Case, right: Worksheet, judge: Judge, singles: readonly Finding[]): Pick<Explained, "findings" | "pairs"> {
   const known = new Set(singles.map(identityOf));
   const hasEvidence = ({ slips }: Hypothesis): boolean => slips.some((slip) => known.has(identityOf({ slips: [slip] })));
   const onMethods = methodSlips(one, right).flatMap((first) => {
@@ -76,13 +81,14 @@ function pairsOfSlips(one: Case, right: Worksheet, judge: Judge, singles: readon
     return onTopOf(first, [...others, ...readingSlips(one, first.sheet)]);
   });
   // A dimension can be tried only once the average fits, so here the reading comes first.
-  const onReadings = singles.filter(({ slips: [slip] }) => slip!.at).slice(0, MOST_PAIRS).flatMap((first) => onTopOf(first, dimensionDigits(one, first.sheet)));
+  const onReadings = singles.filter(({ slips: [slip] }) => slip!.at).slice(0, MOST_UNDER_DIMENSIONS).flatMap((first) => onTopOf(first, dimensionDigits(one, first.sheet)));
   const found = judged(judge, [...onMethods, ...onReadings]).filter(isFull);
   const pairs = distinct(found);
   const withEvidence = pairs.filter(hasEvidence);
-  if (withEvidence.length > 0) return { pairs: withEvidence, tooMany: false };
+  if (withEvidence.length > 0) return { findings: withEvidence, pairs: "with_evidence" };
   const inOneFigure = pairs.length > 0 ? pairs : distinct(judged(judge, readingPairs(one, right, MOST_PAIRS)).filter(isFull));
-  return inOneFigure.length > MOST_PAIRS ? { pairs: [], tooMany: true } : { pairs: inOneFigure, tooMany: false };
+  if (inOneFigure.length > MOST_PAIRS) return { findings: [], pairs: "too_many" };
+  return { findings: inOneFigure, pairs: inOneFigure.length > 0 ? "perhaps_chance" : "none" };
 }
 
 /** Only the findings with the fewest slips. */
