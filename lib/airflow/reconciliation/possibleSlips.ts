@@ -1,6 +1,6 @@
 import type { ReadingLines } from "../types";
 import { forEachDigitVariant, placesOf, type DigitSlip } from "./digitVariants";
-import { deviations, studentQuantile, type Deviation, type Grid } from "./profileFit";
+import { furthestDeviation, studentQuantile, type Deviation, type Grid } from "./profileFit";
 
 /** A reading off the local profile that one slip in its digits would bring back. */
 export interface PossibleSlip {
@@ -57,11 +57,10 @@ export function possibleSlips(lines: ReadingLines, kind: "velocity" | "velocity_
 
 /** The place that is furthest from what the others suggest, where that is further than chance would put it. */
 function furthestOff(grid: Grid, leastScatter: number): Deviation | null {
-  const { deviations: all, freedom } = deviations(grid, leastScatter);
-  const limit = studentQuantile(SUSPECT_BEYOND, freedom);
-  const distance = ({ off, deviation }: Deviation): number => Math.abs(off) / deviation;
-  const furthest = all.reduce<Deviation | null>((most, one) => (most === null || distance(one) > distance(most) ? one : most), null);
-  return furthest && distance(furthest) > limit ? furthest : null;
+  const found = furthestDeviation(grid, leastScatter);
+  if (!found) return null;
+  const { furthest, freedom } = found;
+  return Math.abs(furthest.off) / furthest.deviation > studentQuantile(SUSPECT_BEYOND, freedom) ? furthest : null;
 }
 
 /** Each line as two rows, both from the wall to the middle; the middle point of an odd number is in the first only. */

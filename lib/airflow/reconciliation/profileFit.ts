@@ -17,56 +17,76 @@ const MOST_SWEEPS = 30;
 const SETTLED = 1e-9;
 
 /**
- * Each place of a grid against what its row and its column suggest without it: an additive model fitted by least squares, of
- * logarithms a product of two profiles, with the deleted residual of each place and the standard deviation that the others give it.
+ * The place of a grid that stands off furthest from what its row and its column suggest without it: an additive model
+ * fitted by least squares, of logarithms a product of two profiles, with the deleted residual of the place and the
+ * standard deviation that the others give it. The scatter without a place falls as its residual grows, so the place
+ * with the greatest residual is the furthest off in standard deviations too.
  * @param leastScatter Standard deviation of a single place that is taken at the least.
- * @returns The deviations and the degrees of freedom behind their standard deviation; none where the grid leaves no freedom.
+ * @returns The deviation and the degrees of freedom behind its standard deviation; null where the grid leaves no freedom.
  * @see Deleted (externally studentized) residuals: Cook and Weisberg, Residuals and Influence in Regression, 1982 (from memory).
  */
-export function deviations(grid: Grid, leastScatter: number): { deviations: Deviation[]; freedom: number } {
-  const residual = additiveResiduals(grid);
+export function furthestDeviation(grid: Grid, leastScatter: number): { furthest: Deviation; freedom: number } | null {
   const columns = Math.max(...grid.map((row) => row.length));
-  const places = residual.flatMap((row, index) => row.flatMap((value, column) => (value === null ? [] : [{ row: index, column, value }])));
-  const freedom = places.length - grid.length - columns;
-  if (freedom < 1) return { deviations: [], freedom: 0 };
+  const residual = additiveResiduals(grid, columns);
+  let places = 0;
+  let squares = 0;
+  let greatest = { row: 0, column: 0, value: 0 };
+  for (let row = 0; row < residual.length; row += 1) {
+    for (let column = 0; column < columns; column += 1) {
+      const value = residual[row]![column];
+      if (value == null) continue;
+      places += 1;
+      squares += value ** 2;
+      if (Math.abs(value) > Math.abs(greatest.value)) greatest = { row, column, value };
+    }
+  }
+  const freedom = places - grid.length - columns;
+  if (freedom < 1 || greatest.value === 0) return null;
   // Exact for a full grid; near enough where a place or two are missing.
   const left = 1 - 1 / grid.length - 1 / columns + 1 / (grid.length * columns);
-  const squares = places.reduce((sum, { value }) => sum + value ** 2, 0);
-  const found = places.map(({ row, column, value }) => {
-    const scatter = Math.max(leastScatter, Math.sqrt(Math.max(0, squares - value ** 2 / left) / freedom));
-    return { row, column, off: value / left, expected: grid[row]![column]! - value / left, deviation: scatter / Math.sqrt(left) };
-  });
-  return { deviations: found, freedom };
+  const { row, column, value } = greatest;
+  const scatter = Math.max(leastScatter, Math.sqrt(Math.max(0, squares - value ** 2 / left) / freedom));
+  return { furthest: { row, column, off: value / left, expected: grid[row]![column]! - value / left, deviation: scatter / Math.sqrt(left) }, freedom };
 }
 
 /** What rows and columns leave unexplained: means are taken out in turn until nothing changes, in a full grid at once. */
-function additiveResiduals(grid: Grid): Grid {
+function additiveResiduals(grid: Grid, columns: number): Grid {
   const residual = grid.map((row) => [...row]);
-  const columns = Math.max(...grid.map((row) => row.length));
   for (let sweep = 0, moved = Infinity; sweep < MOST_SWEEPS && moved > SETTLED; sweep += 1) {
     moved = 0;
-    for (const row of residual) moved = Math.max(moved, takeMeanOut(columns, (column) => [row, column]));
-    for (let column = 0; column < columns; column += 1) moved = Math.max(moved, takeMeanOut(residual.length, (row) => [residual[row]!, column]));
+    for (let row = 0; row < residual.length; row += 1) moved = Math.max(moved, takeMeanOutOfRow(residual[row]!));
+    for (let column = 0; column < columns; column += 1) moved = Math.max(moved, takeMeanOutOfColumn(residual, column));
   }
   return residual;
 }
 
-/** Takes the mean out of a row or a column. @returns How much that moved it. */
-function takeMeanOut(length: number, place: (index: number) => [row: (number | null)[], column: number]): number {
+/** Takes the mean out of a row. @returns How much that moved it. */
+function takeMeanOutOfRow(row: (number | null)[]): number {
   let sum = 0;
   let count = 0;
-  for (let index = 0; index < length; index += 1) {
-    const [row, column] = place(index);
+  for (let column = 0; column < row.length; column += 1) {
     const value = row[column];
     if (value == null) continue;
     sum += value;
     count += 1;
   }
   if (count === 0) return 0;
-  for (let index = 0; index < length; index += 1) {
-    const [row, column] = place(index);
-    if (row[column] != null) row[column]! -= sum / count;
+  for (let column = 0; column < row.length; column += 1) if (row[column] != null) row[column]! -= sum / count;
+  return Math.abs(sum / count);
+}
+
+/** Takes the mean out of a column. @returns How much that moved it. */
+function takeMeanOutOfColumn(grid: Grid, column: number): number {
+  let sum = 0;
+  let count = 0;
+  for (let row = 0; row < grid.length; row += 1) {
+    const value = grid[row]![column];
+    if (value == null) continue;
+    sum += value;
+    count += 1;
   }
+  if (count === 0) return 0;
+  for (let row = 0; row < grid.length; row += 1) if (grid[row]![column] != null) grid[row]![column]! -= sum / count;
   return Math.abs(sum / count);
 }
 

@@ -1,3 +1,4 @@
+import { setImmediate } from "node:timers/promises";
 import { batch } from "@/api-spec/calculations/batch";
 import { spendItems } from "@/lib/limits/planLimits";
 import { problemResponse } from "@/lib/problems/problem";
@@ -5,8 +6,11 @@ import type { Handler } from "../operation";
 import { admit, beginPassage, endPassage, jsonAnswer, toProblem, withHeaders, type Passage } from "../passage";
 import { readJson } from "../requestBody";
 import { validate } from "../validation";
-import { runItem } from "./runItem";
+import { runItem, type ItemResult } from "./runItem";
 import { streamedBatch } from "./streamedBatch";
+
+/** After so long others are given a turn. */
+const TURN_MS = 10;
 
 const NDJSON = /^application\/x-ndjson\b/i;
 
@@ -32,6 +36,14 @@ async function wholeBatch(request: Request, passage: Passage): Promise<Response>
   // The request itself is already counted as one.
   if (items.length > 1) await spendItems(passage.key!, items.length - 1, passage.startedAt);
   passage.items = items.length;
-  const results = items.map((item, index) => runItem(item, index, passage.requestId, `/items/${index}`));
+  const results: ItemResult[] = [];
+  let turn = performance.now();
+  for (const [index, item] of items.entries()) {
+    results.push(runItem(item, index, passage.requestId, `/items/${index}`));
+    if (performance.now() - turn > TURN_MS) {
+      await setImmediate();
+      turn = performance.now();
+    }
+  }
   return jsonAnswer({ items: results }, 200, passage);
 }
