@@ -52,8 +52,16 @@ export function withHeaders(response: Response, passage: Passage): Response {
 
 /** A JSON answer with the headers that every answer has. */
 export const jsonAnswer = (answer: unknown, status: number, passage: Passage): Response =>
-  // Encoded here: Buffer does it in a third of the time that the response takes for a string.
-  new Response(Buffer.from(JSON.stringify(answer)), { status, headers: { ...passageHeaders(passage), "Content-Type": "application/json" } });
+  new Response(oneChunk(Buffer.from(JSON.stringify(answer))), { status, headers: { ...passageHeaders(passage), "Content-Type": "application/json" } });
+
+/** A body in one piece. A response makes a stream of bytes of a string or a buffer, which costs several times as much to pass on. */
+const oneChunk = (bytes: Uint8Array): ReadableStream<Uint8Array> =>
+  new ReadableStream({
+    start(controller) {
+      controller.enqueue(bytes);
+      controller.close();
+    },
+  });
 
 /** Counts a request once its outcome is known. */
 export function endPassage(definition: OperationDefinition, passage: Passage, status: number, problem: string | null): void {

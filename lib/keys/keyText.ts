@@ -1,4 +1,4 @@
-import { createHash, randomInt, timingSafeEqual } from "node:crypto";
+import { hash, randomInt, timingSafeEqual } from "node:crypto";
 import { crc32 } from "node:zlib";
 import { newId } from "@/lib/ids/newId";
 
@@ -33,7 +33,7 @@ function checksum(text: string): string {
   return digits;
 }
 
-const hashSecret = (secret: string): Buffer => createHash("sha256").update(secret).digest();
+const hashSecret = (secret: string): Buffer => hash("sha256", secret, "buffer");
 
 /** Makes a key's text. Only the hash may be kept; the text is for the caller's eyes, once. */
 export function makeKeyText(environment: Environment): ParsedKey & { text: string } {
