@@ -112,6 +112,10 @@ describe("a plan of a flat oval duct", () => {
     expect(plan.holes.map(({ face, points }) => `${face} ${points.length}`)).toEqual([...Array<string>(4).fill("top 5"), "left 5", "left 5", "right 5", "right 5"]);
     expect(plan.points).toBe(40);
   });
+  it("has no more than 64 points in its middle, however long it is", () => {
+    const long = traversePlan({ duct: { shape: "flat_oval", measured: "inside", major: { value: 20, unit: "m" }, minor: { value: 2, unit: "m" } }, layout: "equal_area" });
+    expect(long.holes.filter(({ angle }) => angle === null).flatMap(({ points }) => points)).toHaveLength(64);
+  });
   it("gives each part the weight of its area", () => {
     const middle = plan.holes.filter(({ angle }) => angle === null).flatMap(({ points }) => points).reduce((sum, { weight }) => sum + weight, 0);
     expect(middle).toBeCloseTo((14 * 22) / (14 * 22 + Math.PI * 49), 12);

@@ -12,13 +12,13 @@ const ANCHORS: readonly (readonly [number, number, number])[] = [
 /**
  * Colour of a velocity, dark blue for the slowest to yellow for the fastest.
  * @param share From 0 to 1; values outside are taken as the nearer end.
- * @returns A CSS colour.
- * @example cividis(0) // "rgb(0 34 78)"
+ * @returns A colour as `#rrggbb`.
+ * @example cividis(0) // "#00224e"
  */
 export function cividis(share: number): string {
   const at = Math.min(Math.max(share, 0), 1) * (ANCHORS.length - 1);
   const low = ANCHORS[Math.floor(at)]!;
   const high = ANCHORS[Math.ceil(at)]!;
   const channels = low.map((value, channel) => Math.round(value + (high[channel]! - value) * (at - Math.floor(at))));
-  return `rgb(${channels.join(" ")})`;
+  return `#${channels.map((value) => value.toString(16).padStart(2, "0")).join("")}`;
 }

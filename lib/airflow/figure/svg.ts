@@ -49,9 +49,9 @@ export const FONT_SIZE = 11;
 /** Width of words in the monospaced face: every character takes three fifths of the size. */
 export const monoWidth = (words: string, size = FONT_SIZE): number => words.length * size * 0.6;
 
-/** Words broken into lines that fit a width, for the proportional face, whose characters are about half as wide as high. */
+/** Words broken into lines that fit a width, for the proportional face, whose characters are on average a little over half as wide as high. */
 export function wrap(words: string, width: number, size: number): string[] {
-  const most = Math.max(1, Math.floor(width / (size * 0.52)));
+  const most = Math.max(1, Math.floor(width / (size * 0.56)));
   const lines: string[] = [];
   for (const word of words.split(" ")) {
     const last = lines.at(-1);

@@ -14,19 +14,20 @@ export function customLines(duct: WalledDuct, points: PlanPoints | undefined, fa
   const other = (["across", "down", "perDiameter", "diameters"] as const).find((name) => points?.[name] !== undefined);
   if (other) throw refusal(["points", other], "points_not_for_layout", "The layout `custom` takes lines alone; their depths are the points.");
   if (lines.reduce((sum, { depths }) => sum + depths.length, 0) > MOST_POINTS) throw refusal(["points", "lines"], "too_many_points", `A traverse has at most ${MOST_POINTS} points.`);
-  return lines.map((line, index) => customLine(duct, line, face, ["points", "lines", index]));
+  const firstTurn = lines[0]?.angle ?? 0;
+  return lines.map((line, index) => customLine(duct, line, face, firstTurn, ["points", "lines", index]));
 }
 
-function customLine(duct: WalledDuct, line: CustomLine, face: Face, path: Path): TraverseLine {
+function customLine(duct: WalledDuct, line: CustomLine, face: Face, firstTurn: number, path: Path): TraverseLine {
   requireDepths(line, path);
-  const chord = duct.inside.shape === "round" ? roundLine(duct.inside.diameter, duct.wall, line, face, path) : straightLine(duct, line, face, path);
+  const chord = duct.inside.shape === "round" ? roundLine(duct.inside.diameter, duct.wall, line, face, firstTurn, path) : straightLine(duct, line, face, path);
   return { ...chord, points: line.depths.map((depth, index) => pointAt(chord, depth * chord.length, line.weights?.[index] ?? 1)) };
 }
 
-function roundLine(diameter: number, wall: number, { at, angle = 0 }: CustomLine, face: Face, path: Path): Hole & Chord {
+function roundLine(diameter: number, wall: number, { at, angle = 0 }: CustomLine, face: Face, firstTurn: number, path: Path): Hole & Chord {
   if (at !== undefined) throw refusal([...path, "at"], "points_not_for_layout", "A line of a round duct is placed by its `angle`.");
   if (!(Math.abs(angle) <= 360)) throw refusal([...path, "angle"], "angle_out_of_range", "An angle is from −360 to 360 degrees.");
-  return diameterLine(diameter, wall, face, angle);
+  return diameterLine(diameter, wall, face, angle, firstTurn);
 }
 
 function straightLine(duct: WalledDuct, { at, angle }: CustomLine, face: Face, path: Path): Hole & Chord {

@@ -1,7 +1,7 @@
 import type { InsideDuct } from "../duct/insideDuct";
 import { AirflowInputError } from "../errors";
 import type { LayoutRule, Site } from "../types";
-import { cellsOn, equalAreaCells, equalAreaPerDiameter } from "./equalArea";
+import { cellsOn, equalAreaCells, equalAreaPerDiameter, MOST_CELLS } from "./equalArea";
 import { LOG_LINEAR_LEAST_PER_DIAMETER } from "./logLinear";
 import { logTchebycheffCount } from "./logTchebycheff";
 import { method1Grid, method1Minimum } from "./method1";
@@ -59,11 +59,14 @@ function roundMinimum(diameter: number, layout: LayoutRule, method1Count: number
   return layout === "equal_area" ? equalAreaPerDiameter(diameter) : method1Count / DIAMETERS;
 }
 
-/** The middle's lines stand in strips no wider than 6 in: there is no wall at its sides for a wall rule to follow. */
+/**
+ * The middle's lines stand in strips no wider than 6 in, as long as it has no more than 64 points: there is no wall at its
+ * sides for a wall rule to follow.
+ */
 function flatOvalMinimum(major: number, minor: number, layout: LayoutRule): PointCounts {
   const middle = major - minor;
-  const across = middle > 0 ? cellsOn(middle) : 0;
   const down = layout === "log_tchebycheff" ? logTchebycheffCount(minor) : equalAreaCells(minor, minor).down;
+  const across = middle > 0 ? Math.min(cellsOn(middle), Math.floor(MOST_CELLS / down)) : 0;
   return { across, down, perDiameter: equalAreaPerDiameter(minor), diameters: DIAMETERS };
 }
 

@@ -21,16 +21,17 @@ export function roundLines(duct: WalledDuct, diameter: number, layout: LayoutRul
 }
 
 /**
- * The diameter that starts a number of degrees clockwise (anticlockwise below 0) from the middle of a face.
- * The hole is measured round the duct, with a tape.
+ * The diameter that starts a number of degrees clockwise from the middle of a face. Its hole is measured round the duct,
+ * with a tape, from hole 1.
+ * @param firstTurn Degrees clockwise from the middle of the face to hole 1.
  */
-export function diameterLine(diameter: number, wall: number, face: Face, turn: number): Hole & Chord {
+export function diameterLine(diameter: number, wall: number, face: Face, turn: number, firstTurn = 0): Hole & Chord {
   const radius = diameter / 2;
   const angle = (ANGLE_OF[face] + turn + 360) % 360;
-  const radians = (Math.abs(turn) * Math.PI) / 180;
+  const fromFirst = ((turn - firstTurn + 900) % 360) - 180;
+  const radians = (Math.abs(fromFirst) * Math.PI) / 180;
   return {
-    face: faceAt(angle), edge: turn < 0 ? "hole_1_anticlockwise" : "hole_1_clockwise", along: radius * radians, alongOutside: (radius + wall) * radians, angle,
+    face: faceAt(angle), edge: fromFirst < 0 ? "hole_1_anticlockwise" : "hole_1_clockwise", along: radius * radians, alongOutside: (radius + wall) * radians, angle,
     ...radialChord({ x: radius, y: radius }, radius, wall, angle, diameter),
   };
 }
-
