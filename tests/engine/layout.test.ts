@@ -165,6 +165,13 @@ describe("a custom layout", () => {
     const plan = traversePlan({ duct: OVAL, layout: "custom", enterFrom: "left", points: { lines: [{ at: 0.5, depths: [0.5] }] } });
     expect(plan.holes[0]!.points[0]!.fromInside.value).toBeCloseTo(18, 9);
   });
+  it("measures the holes of a round duct from its first", () => {
+    const { holes } = traversePlan({ duct: round(20), layout: "custom", points: { lines: [{ angle: 30, depths: [0.5] }, { angle: -30, depths: [0.5] }] } });
+    expect(holes.map(({ edge, along, angle }) => ({ edge, along: along.value, angle }))).toEqual([
+      { edge: "hole_1_clockwise", along: 0, angle: 30 },
+      { edge: "hole_1_anticlockwise", along: expect.closeTo((Math.PI * 20) / 6, 9) as number, angle: 330 },
+    ]);
+  });
   it("places the lines of a round duct by their angle", () => {
     const plan = traversePlan({ duct: round(20), layout: "custom", points: { lines: [{ angle: 45, depths: [0.25] }] } });
     expect(plan.holes[0]!.points[0]!.position).toEqual({ x: { value: expect.closeTo(10 + 5 * Math.SQRT1_2, 9) as number, unit: "in" }, y: { value: expect.closeTo(10 + 5 * Math.SQRT1_2, 9) as number, unit: "in" } });
@@ -216,6 +223,10 @@ describe("the site", () => {
   it("decides the check by the rule of the layout", () => {
     expect(checkOf(siteOf("log_linear", straight(8, 2)), "site_disturbance")).toMatchObject({ passed: false, compared: { value: expect.closeTo(2, 9) as number, limit: 3 } });
     expect(checkOf(siteOf("method_1", straight(8, 2)), "site_disturbance")).toMatchObject({ passed: true });
+  });
+  it("fails where Method 1 allows no traverse at all", () => {
+    expect(checkOf(siteOf("method_1", straight(5, 1)), "site_disturbance")).toMatchObject({ passed: false, severity: "caution" });
+    expect(checkOf(siteOf("method_1", straight(5, 0.4)), "site_disturbance")).toMatchObject({ passed: false, severity: "failure", compared: { value: expect.closeTo(0.4, 9) as number, limit: 0.5 } });
   });
   it("is undecided where a length is not known", () => {
     expect(siteOf("log_linear").site.rules.map(({ meets }) => meets)).toEqual([null, null]);

@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { annulusPositions } from "@/lib/airflow/layout/equalArea";
+import * as method1 from "@/lib/airflow/layout/method1";
 import { METHOD_1_GRIDS, METHOD_1_LEAST_DIAMETER, method1Minimum, wallLimit } from "@/lib/airflow/layout/method1";
 import type { InsideDuct } from "@/lib/airflow/duct/insideDuct";
 import { hydraulicDiameter } from "@/lib/airflow/duct/hydraulicDiameter";
@@ -43,6 +44,11 @@ describe("40 CFR Part 60, Appendix A-1, Method 1", () => {
     expect(method1Minimum(round(1), site(round(1), 5, 2))).toBe(near);
     expect(method1Minimum(round(1), site(round(1), 8, 1))).toBe(near);
     expect(method1Minimum(round(1))).toBe(near);
+  });
+
+  it(`has the straight lengths of its text: ${String(fact("site").value)} (read: ${titleOf("M1")})`, () => {
+    const { METHOD_1_DOWNSTREAM_DIAMETERS: downstream, METHOD_1_UPSTREAM_DIAMETERS: upstream, METHOD_1_LEAST_DOWNSTREAM_DIAMETERS: leastDownstream, METHOD_1_LEAST_UPSTREAM_DIAMETERS: leastUpstream } = method1;
+    expect(`>= ${downstream} D downstream and >= ${upstream} D upstream of a disturbance; fallback >= ${leastDownstream} D and >= ${leastUpstream} D`).toBe(fact("site").value);
   });
 
   it(`is not for ducts under 0.30 m (read: ${titleOf("M1")})`, () => {

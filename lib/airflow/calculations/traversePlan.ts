@@ -48,7 +48,7 @@ export interface PlannedSite {
   /** Straight lengths in hydraulic diameters; null where not given. */
   downstreamDiameters: number | null;
   upstreamDiameters: number | null;
-  rules: (SiteRule & { meets: boolean | null })[];
+  rules: (Omit<SiteRule, "least"> & { meets: boolean | null })[];
 }
 
 export interface TraversePlanAnswer {
@@ -114,5 +114,5 @@ function plannedPoint({ depth, weight, standsFor, x, y }: LayoutPoint, wall: num
 const plannedSite = ({ site }: TraversePlan): PlannedSite => ({
   downstreamDiameters: site.downstream,
   upstreamDiameters: site.upstream,
-  rules: SITE_RULES.map((rule) => ({ ...rule, meets: meetsSiteRule(site, rule) })),
+  rules: SITE_RULES.map(({ name, downstream, upstream, source }) => ({ name, downstream, upstream, source, meets: meetsSiteRule(site, { downstream, upstream }) })),
 });

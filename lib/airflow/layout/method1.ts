@@ -15,6 +15,9 @@ export const METHOD_1_MOST_PER_DIAMETER = 24;
 /** Straight lengths, in equivalent diameters, behind and before the plane with which the fewest points do. */
 export const METHOD_1_DOWNSTREAM_DIAMETERS = 8;
 export const METHOD_1_UPSTREAM_DIAMETERS = 2;
+/** Nearer to a disturbance than this the method does not allow a traverse at all. */
+export const METHOD_1_LEAST_DOWNSTREAM_DIAMETERS = 2;
+export const METHOD_1_LEAST_UPSTREAM_DIAMETERS = 0.5;
 /** The method is not for a smaller duct, in m ("about 0.30 m (12 in)"). */
 export const METHOD_1_LEAST_DIAMETER = 0.3;
 /** "0.61 m (24 in)": the counts and the wall limits change here. */

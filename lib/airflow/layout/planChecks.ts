@@ -73,9 +73,11 @@ const largeEnough: PlanCheckFunction = ({ layout, hydraulicDiameter }, system) =
 /** Against the rule that goes with the layout: Method 1's own, else that of ASHRAE 111. */
 const siteDisturbance: PlanCheckFunction = ({ layout, site }) => {
   const rule = SITE_RULES.find(({ name }) => name === (layout === "method_1" ? "method_1" : "ashrae_111"))!;
+  const tooNear = rule.least !== null && meetsSiteRule(site, rule.least) === false;
+  const needed = tooNear ? rule.least! : rule;
   const parts = [
-    { length: site.downstream, needed: rule.downstream, quantity: "straight length from the last disturbance, in hydraulic diameters" },
-    { length: site.upstream, needed: rule.upstream, quantity: "straight length to the next disturbance, in hydraulic diameters" },
+    { length: site.downstream, needed: needed.downstream, quantity: "straight length from the last disturbance, in hydraulic diameters" },
+    { length: site.upstream, needed: needed.upstream, quantity: "straight length to the next disturbance, in hydraulic diameters" },
   ].flatMap(({ length, ...rest }) => (length === null ? [] : [{ ...rest, length }]));
   const [first] = parts;
   if (!first) return null;
@@ -84,14 +86,18 @@ const siteDisturbance: PlanCheckFunction = ({ layout, site }) => {
   return {
     code: "site_disturbance",
     passed,
-    severity: "caution",
-    detail: passed
-      ? parts.length === 2 ? "The straight lengths suffice." : "The straight length given suffices; the other is not known."
-      : `The plane is too near a disturbance: ${worst.length.toFixed(1)} of ${worst.needed} hydraulic diameters. Move it, or count on a larger uncertainty.`,
+    severity: tooNear ? "failure" : "caution",
+    detail: siteDetail(passed, tooNear, parts.length === 2, `${worst.length.toFixed(1)} of ${worst.needed} hydraulic diameters`),
     compared: { quantity: worst.quantity, value: worst.length, limit: worst.needed, unit: null },
     source: rule.source,
   };
 };
+
+function siteDetail(passed: boolean, tooNear: boolean, bothKnown: boolean, shortfall: string): string {
+  if (passed) return bothKnown ? "The straight lengths suffice." : "The straight length given suffices; the other is not known.";
+  if (tooNear) return `The plane is nearer to a disturbance than Method 1 allows with any number of points: ${shortfall}. Move it.`;
+  return `The plane is too near a disturbance: ${shortfall}. Move it, or count on a larger uncertainty.`;
+}
 
 /** The result's own check, which looks at nothing but duct and probe. */
 const thinEnough: PlanCheckFunction = ({ inside, probe }) =>

@@ -1,7 +1,7 @@
 import { DOWNSTREAM_DIAMETERS, UPSTREAM_DIAMETERS } from "../checks/siteDisturbance";
 import type { Site } from "../types";
 import { toSi } from "../units/convert";
-import { METHOD_1_DOWNSTREAM_DIAMETERS, METHOD_1_UPSTREAM_DIAMETERS } from "./method1";
+import { METHOD_1_DOWNSTREAM_DIAMETERS, METHOD_1_LEAST_DOWNSTREAM_DIAMETERS, METHOD_1_LEAST_UPSTREAM_DIAMETERS, METHOD_1_UPSTREAM_DIAMETERS } from "./method1";
 
 /** Straight lengths that a standard asks for, in hydraulic diameters. */
 export interface SiteRule {
@@ -9,11 +9,16 @@ export interface SiteRule {
   downstream: number;
   upstream: number;
   source: string;
+  /** Lengths below which the standard allows no traverse, with however many points; null where it has none. */
+  least: { downstream: number; upstream: number } | null;
 }
 
 export const SITE_RULES: readonly SiteRule[] = [
-  { name: "ashrae_111", downstream: DOWNSTREAM_DIAMETERS, upstream: UPSTREAM_DIAMETERS, source: "ASHRAE 111, from memory" },
-  { name: "method_1", downstream: METHOD_1_DOWNSTREAM_DIAMETERS, upstream: METHOD_1_UPSTREAM_DIAMETERS, source: "40 CFR Part 60, Appendix A-1, Method 1" },
+  { name: "ashrae_111", downstream: DOWNSTREAM_DIAMETERS, upstream: UPSTREAM_DIAMETERS, source: "ASHRAE 111, from memory", least: null },
+  {
+    name: "method_1", downstream: METHOD_1_DOWNSTREAM_DIAMETERS, upstream: METHOD_1_UPSTREAM_DIAMETERS, source: "40 CFR Part 60, Appendix A-1, Method 1",
+    least: { downstream: METHOD_1_LEAST_DOWNSTREAM_DIAMETERS, upstream: METHOD_1_LEAST_UPSTREAM_DIAMETERS },
+  },
 ];
 
 /** Straight lengths in hydraulic diameters; null where not known. */
@@ -32,7 +37,7 @@ export function siteLengths(site: Site | undefined, diameter: number): SiteLengt
 }
 
 /** Whether a site has the straight lengths of a rule; null where a length is not known and the other does not fail already. */
-export function meetsSiteRule({ downstream, upstream }: SiteLengths, rule: SiteRule): boolean | null {
+export function meetsSiteRule({ downstream, upstream }: SiteLengths, rule: { downstream: number; upstream: number }): boolean | null {
   const parts = [reaches(downstream, rule.downstream), reaches(upstream, rule.upstream)];
   if (parts.includes(false)) return false;
   return parts.includes(null) ? null : true;
