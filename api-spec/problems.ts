@@ -131,9 +131,9 @@ export const PROBLEMS = {
   },
   "too-many-attempts": {
     status: 429,
-    title: "Too many failed attempts",
-    meaning: "There were too many failed sign-ins from this address.",
-    remedy: "Wait for the time in Retry-After, or reset the password.",
+    title: "Too many attempts",
+    meaning: "There were too many failed sign-ins, sign-ups or requests for an e-mail from this address or to it.",
+    remedy: "Wait for the time in Retry-After.",
   },
   "role-not-sufficient": {
     status: 403,

@@ -6,6 +6,7 @@ import { callerAddress } from "@/lib/runtime/caller";
 export interface AuditEntry {
   action:
     | "sign_up" | "sign_in" | "sign_in_refused" | "sign_out" | "email_verified" | "password_reset_asked" | "password_reset"
+    | "password_changed" | "session_ended"
     | "key_created" | "key_rotated" | "key_revoked";
   organisationId?: string | null;
   actorUserId?: string | null;

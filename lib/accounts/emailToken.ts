@@ -17,14 +17,25 @@ export async function createEmailToken(userId: string, purpose: EmailPurpose, db
   return token;
 }
 
-/** Uses a token up and returns whose it was. Throws the problem when it is unknown, used or expired. */
+const goodTokens = (db: Knex, token: string, purpose: EmailPurpose): Knex.QueryBuilder =>
+  db("email_tokens").where({ token_hash: hashToken(token), purpose, used_at: null }).where("expires_at", ">", new Date());
+
+/** Whose a token is, without using it up. Throws the problem when it is unknown, used or expired. */
+export async function ownerOfEmailToken(token: string, purpose: EmailPurpose, db: Knex = database()): Promise<string> {
+  const row = await goodTokens(db, token, purpose).first<{ user_id: string } | undefined>("user_id");
+  if (!row) throw linkNotValid();
+  return row.user_id;
+}
+
+/** Uses a token up. Throws the problem when it is unknown, used or expired, or used by somebody else meanwhile. */
 export async function redeemEmailToken(token: string, purpose: EmailPurpose, db: Knex): Promise<string> {
-  const now = new Date();
-  const used = await db("email_tokens").where({ token_hash: hashToken(token), purpose, used_at: null }).where("expires_at", ">", now).update({ used_at: now });
-  if (used === 1) {
-    const row = await db("email_tokens").where({ token_hash: hashToken(token) }).first("user_id");
-    return row.user_id as string;
-  }
+  const userId = await ownerOfEmailToken(token, purpose, db);
+  const used = await goodTokens(db, token, purpose).update({ used_at: new Date() });
+  if (used !== 1) throw linkNotValid();
+  return userId;
+}
+
+function linkNotValid(): Problem {
   const detail = "This link is not valid: it was used already, it has expired, or a newer one was sent. Ask for a new one.";
-  throw new Problem("link-not-valid", { detail, errors: [{ pointer: "/token", code: "link_not_valid", detail }] });
+  return new Problem("link-not-valid", { detail, errors: [{ pointer: "/token", code: "link_not_valid", detail }] });
 }

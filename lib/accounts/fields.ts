@@ -8,6 +8,6 @@ export const emailAddress = z.string().trim().toLowerCase().pipe(z.email("This i
 export const personName = z
   .string()
   .trim()
-  .min(1, "This must not be empty.")
+  .regex(/./u, "This must not be empty.")
   .max(120)
   .regex(/^\P{Cc}*$/u, "Control characters are not taken here.");

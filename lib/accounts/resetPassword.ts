@@ -1,35 +1,41 @@
 import { database } from "@/db/connection";
 import { sendMail } from "@/lib/mail/sendMail";
-import { Problem } from "@/lib/problems/problem";
-import { config } from "@/lib/runtime/config";
+import { inBackground } from "@/lib/runtime/background";
+import { callerNetwork, maySpend, renew, spend } from "./allowance";
 import { recordAudit } from "./audit";
-import { createEmailToken, redeemEmailToken } from "./emailToken";
-import { hashPassword, passwordFault } from "./password";
+import { createEmailToken, ownerOfEmailToken, redeemEmailToken } from "./emailToken";
+import { passwordChanged, resetLink } from "./letters";
+import { hashPassword, requireGoodPassword } from "./password";
+import { setPassword } from "./setPassword";
 
-/** Sends a reset link where the address has an account; says nothing either way. */
+/** Sends a reset link where the address has an account; neither the answer nor its duration says whether it has. */
 export async function askForReset(email: string): Promise<void> {
+  await spend("askForReset", callerNetwork());
   const user = await database()("users").where({ email }).first<{ id: string } | undefined>("id");
-  if (!user) return;
-  const token = await createEmailToken(user.id, "reset_password");
-  await recordAudit({ action: "password_reset_asked", actorUserId: user.id, subject: user.id });
-  await sendMail({
-    to: email,
-    subject: "Set a new password",
-    text: `Open this page and choose a new password. The link is good for one hour, once.\n\n${config().AVERDUCT_URL}/reset-password?token=${token}\n\nIf you did not ask for it, do nothing; your password stays as it is.`,
-  });
+  if (user) inBackground("a reset link", () => sendResetLink(user.id, email));
 }
 
-/** Sets a new password through a link and ends every session the person had. */
+async function sendResetLink(userId: string, email: string): Promise<void> {
+  // Before the token: a new one ends the earlier, which must stay good when no e-mail follows.
+  if (!(await maySpend("mail", email))) return;
+  const token = await createEmailToken(userId, "reset_password");
+  await recordAudit({ action: "password_reset_asked", actorUserId: userId, subject: userId });
+  await sendMail(resetLink(email, token));
+}
+
+/** Sets a new password through a link, which also proves the address, and ends every session the person had. */
 export async function resetPassword({ token, password }: { token: string; password: string }): Promise<void> {
+  const userId = await ownerOfEmailToken(token, "reset_password");
+  const user = (await database()("users").where({ id: userId }).first<{ email: string; name: string }>("email", "name"))!;
+  requireGoodPassword(password, user);
+  // Outside the transaction: waiting in line to hash must not hold a connection.
+  const passwordHash = await hashPassword(password);
   await database().transaction(async (db) => {
-    const userId = await redeemEmailToken(token, "reset_password", db);
-    const user = await db("users").where({ id: userId }).first<{ email: string; name: string }>("email", "name");
-    const fault = passwordFault(password, user!);
-    // Thrown inside the transaction, so that the link stays good for another try.
-    if (fault) throw new Problem("invalid-request", { detail: fault, errors: [{ pointer: "/password", code: "password_not_accepted", detail: fault }] });
-    const passwordHash = await hashPassword(password);
-    await db("users").where({ id: userId }).update({ password_hash: passwordHash, email_verified_at: db.raw("COALESCE(email_verified_at, NOW(3))") });
-    await db("sessions").where({ user_id: userId }).delete();
+    await redeemEmailToken(token, "reset_password", db);
+    await db("users").where({ id: userId, email_verified_at: null }).update({ email_verified_at: new Date() });
+    await setPassword(userId, passwordHash, db);
     await recordAudit({ action: "password_reset", actorUserId: userId, subject: userId }, db);
   });
+  await renew("signInToAccount", user.email, callerNetwork());
+  inBackground("the notice of a new password", () => sendMail(passwordChanged(user.email)));
 }

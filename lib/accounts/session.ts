@@ -1,3 +1,4 @@
+import type { Knex } from "knex";
 import { database } from "@/db/connection";
 import { newId } from "@/lib/ids/newId";
 import { callerAddress } from "@/lib/runtime/caller";
@@ -25,8 +26,14 @@ const IDLE_MS = 3 * DAY_MS;
 const SEEN_EVERY_MS = 60_000;
 const LONGEST_TOKEN = 100;
 
-/** Begins a session and returns the token for the cookie. */
-export async function createSession(userId: string, userAgent: string): Promise<string> {
+/** Who begins a session: from which program, and in place of which session it showed. */
+export interface Visit {
+  userAgent: string;
+  formerSessionId?: string;
+}
+
+/** Begins a session and returns the token for the cookie. The session it takes the place of ends. */
+export async function createSession(userId: string, { userAgent, formerSessionId }: Visit): Promise<string> {
   const { token, hash } = makeSecretToken();
   await database()("sessions").insert({
     id: newId("ses"),
@@ -36,6 +43,7 @@ export async function createSession(userId: string, userAgent: string): Promise<
     user_agent: userAgent.slice(0, 300),
     expires_at: new Date(Date.now() + SESSION_DAYS * DAY_MS),
   });
+  if (formerSessionId) await endSession(formerSessionId);
   return token;
 }
 
@@ -44,8 +52,8 @@ export const endSession = async (sessionId: string): Promise<void> => {
 };
 
 /** Ends all of a person's sessions, but for one they may keep. */
-export async function endSessionsOf(userId: string, keepSessionId?: string): Promise<void> {
-  await database()("sessions").where({ user_id: userId }).whereNot("id", keepSessionId ?? "").delete();
+export async function endSessionsOf(userId: string, keepSessionId?: string, db: Knex = database()): Promise<void> {
+  await db("sessions").where({ user_id: userId }).whereNot("id", keepSessionId ?? "").delete();
 }
 
 interface SessionRow {
@@ -63,17 +71,19 @@ interface SessionRow {
   suspended_at: Date | null;
 }
 
+/** Narrows a query on `sessions as s` to those that have neither expired nor been idle for too long. */
+export const aliveSessions = (query: Knex.QueryBuilder, now: number): Knex.QueryBuilder =>
+  query.where("s.expires_at", ">", new Date(now)).where("s.last_seen_at", ">", new Date(now - IDLE_MS));
+
 /** Who a session's token belongs to; null when it is unknown, expired or idle for too long. */
 export async function findSignedIn(token: string | undefined): Promise<SignedIn | null> {
   if (!token || token.length > LONGEST_TOKEN) return null;
   const now = Date.now();
-  const row = await database()("sessions as s")
+  const row = await aliveSessions(database()("sessions as s"), now)
     .join("users as u", "u.id", "s.user_id")
     .leftJoin("memberships as m", "m.user_id", "u.id")
     .leftJoin("organisations as o", "o.id", "m.organisation_id")
     .where("s.token_hash", hashToken(token))
-    .where("s.expires_at", ">", new Date(now))
-    .where("s.last_seen_at", ">", new Date(now - IDLE_MS))
     .orderBy("m.created_at")
     .first<SessionRow | undefined>(
       "s.id as session_id", "s.last_seen_at", "u.id as user_id", "u.email", "u.name", "u.is_administrator", "u.email_verified_at",

@@ -18,53 +18,71 @@ export type Member = SignedIn & { organisation: NonNullable<SignedIn["organisati
 
 type Caller<A extends Access> = A extends "anyone" ? SignedIn | null : A extends Role ? Member : SignedIn;
 
-interface PortalDefinition<A extends Access, Body extends z.ZodType, Params extends z.ZodType> {
+interface PortalDefinition<A extends Access, Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType> {
   access: A;
   body?: Body;
   params?: Params;
+  query?: Query;
   /** Status of a successful answer; 200 when left out. */
   status?: 200 | 201 | 202 | 204;
 }
 
-interface PortalCall<A extends Access, Body, Params> {
+interface PortalCall<A extends Access, Body, Params, Query> {
   caller: Caller<A>;
   input: Body;
   params: Params;
+  query: Query;
   userAgent: string;
 }
 
-/** What a portal operation gives: the answer's body, and cookies to set. */
+/** What a portal operation gives: the answer's body, a cookie to set and headers of its own. */
 interface PortalResult {
   body?: unknown;
   cookie?: string;
+  headers?: Record<string, string>;
 }
 
 const RANK: Record<Role, number> = { viewer: 1, developer: 2, owner: 3 };
 
-/** Makes the handler of one of the portal's own routes: origin, session, role, validation, the operation, answer. */
-export function portalOperation<A extends Access, Body extends z.ZodType, Params extends z.ZodType>(
-  definition: PortalDefinition<A, Body, Params>,
-  run: (call: PortalCall<A, z.output<Body>, z.output<Params>>) => Promise<PortalResult>,
+/**
+ * Makes the handler of one of the portal's own routes: origin, session, role, validation, the operation, answer.
+ * An operation whose answer is not JSON, such as a file, gives a Response.
+ */
+export function portalOperation<A extends Access, Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType>(
+  definition: PortalDefinition<A, Body, Params, Query>,
+  run: (call: PortalCall<A, z.output<Body>, z.output<Params>, z.output<Query>>) => Promise<PortalResult | Response>,
 ): Handler {
   return async (request, context) => {
     const requestId = newId("req");
     try {
       requireSameOrigin(request);
-      const caller = await callerFor(definition.access, request);
-      const input = definition.body && validate(definition.body, await readJson(request));
-      const params = definition.params && validate(definition.params, await context.params, "path");
-      const call = { caller, input, params, userAgent: request.headers.get("user-agent") ?? "" } as PortalCall<A, z.output<Body>, z.output<Params>>;
-      const { body = {}, cookie } = await run(call);
-      const status = definition.status ?? 200;
-      const headers: Record<string, string> = { "Content-Type": "application/json", "Cache-Control": "no-store", "Request-Id": requestId };
-      if (cookie) headers["Set-Cookie"] = cookie;
-      return new Response(status === 204 ? null : JSON.stringify(body), { status, headers });
+      const call = {
+        caller: await callerFor(definition.access, request),
+        input: definition.body && validate(definition.body, await readJson(request)),
+        params: definition.params && validate(definition.params, await context.params, "path"),
+        query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),
+        userAgent: request.headers.get("user-agent") ?? "",
+      } as PortalCall<A, z.output<Body>, z.output<Params>, z.output<Query>>;
+      const result = await run(call);
+      return asPrivate(result instanceof Response ? result : jsonResponse(result, definition.status ?? 200), requestId);
     } catch (error) {
-      const response = problemResponse(toProblem(error, requestId), requestId);
-      response.headers.set("Request-Id", requestId);
-      return response;
+      return asPrivate(problemResponse(toProblem(error, requestId), requestId), requestId);
     }
   };
+}
+
+function jsonResponse({ body = {}, cookie, headers }: PortalResult, status: number): Response {
+  const response = new Response(status === 204 ? null : JSON.stringify(body), { status, headers: { "Content-Type": "application/json", ...headers } });
+  if (cookie) response.headers.append("Set-Cookie", cookie);
+  return response;
+}
+
+/** Puts on an answer the headers that every one of the portal's has; it is for the person who asked and nobody else. */
+function asPrivate(response: Response, requestId: string): Response {
+  response.headers.set("Cache-Control", "no-store");
+  response.headers.set("X-Content-Type-Options", "nosniff");
+  response.headers.set("Request-Id", requestId);
+  return response;
 }
 
 async function callerFor(access: Access, request: Request): Promise<SignedIn | null> {

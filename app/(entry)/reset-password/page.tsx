@@ -4,11 +4,11 @@ import { ResetPasswordForm } from "./ResetPasswordForm";
 
 export const metadata: Metadata = { title: "Set a new password" };
 
-export default async function ResetPasswordPage({ searchParams }: { searchParams: Promise<{ token?: string }> }) {
-  const { token = "" } = await searchParams;
+export default async function ResetPasswordPage({ searchParams }: PageProps<"/reset-password">) {
+  const { token } = await searchParams;
   return (
     <PlainSheet title="Set a new password">
-      <ResetPasswordForm token={token} />
+      <ResetPasswordForm token={typeof token === "string" ? token : ""} />
     </PlainSheet>
   );
 }

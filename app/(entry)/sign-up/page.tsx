@@ -1,14 +1,14 @@
 import type { Metadata } from "next";
 import { PlainSheet } from "@/app/_components/layout/PlainSheet";
-import { isMailboxOpen } from "@/lib/mail/mailbox";
+import { mailboxIsOpen } from "@/app/_mailbox";
 import { SignUpForm } from "./SignUpForm";
 
 export const metadata: Metadata = { title: "Create an account" };
 
-export default function SignUpPage() {
+export default async function SignUpPage() {
   return (
     <PlainSheet title="Create an account">
-      <SignUpForm localMailbox={isMailboxOpen()} />
+      <SignUpForm localMailbox={await mailboxIsOpen()} />
     </PlainSheet>
   );
 }

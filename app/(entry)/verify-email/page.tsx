@@ -4,11 +4,11 @@ import { ConfirmEmail } from "./ConfirmEmail";
 
 export const metadata: Metadata = { title: "Confirm your e-mail address" };
 
-export default async function VerifyEmailPage({ searchParams }: { searchParams: Promise<{ token?: string }> }) {
-  const { token = "" } = await searchParams;
+export default async function VerifyEmailPage({ searchParams }: PageProps<"/verify-email">) {
+  const { token } = await searchParams;
   return (
     <PlainSheet title="Confirm your e-mail address">
-      <ConfirmEmail token={token} />
+      <ConfirmEmail token={typeof token === "string" ? token : ""} />
     </PlainSheet>
   );
 }

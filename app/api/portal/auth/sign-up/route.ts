@@ -1,6 +1,7 @@
 import { z } from "zod";
 import { signUp } from "@/lib/accounts/signUp";
 import { emailAddress, personName } from "@/lib/accounts/fields";
+import { otherMethods } from "@/lib/http/otherMethods";
 import { portalOperation } from "@/lib/http/portalOperation";
 
 const body = z.strictObject({ email: emailAddress, name: personName, organisation: personName, password: z.string() });
@@ -9,3 +10,4 @@ export const POST = portalOperation({ access: "anyone", body, status: 201 }, asy
   await signUp(input);
   return {};
 });
+export const { GET, PUT, PATCH, DELETE } = otherMethods("POST");
