@@ -1,6 +1,6 @@
 import { NextResponse, type NextRequest } from "next/server";
 
-/** Pages that show the API reference: its package writes styles and scripts into the page itself. */
+/** The page that shows the API reference: its package writes styles and scripts into the page itself. */
 const REFERENCE = "/docs/reference";
 
 /**
@@ -21,7 +21,7 @@ export function proxy(request: NextRequest): NextResponse {
 
 function policyFor(path: string, nonce: string): string {
   const development = process.env.NODE_ENV === "development" ? " 'unsafe-eval'" : "";
-  const scripts = path.startsWith(REFERENCE) ? `'self' 'unsafe-inline'${development}` : `'self' 'nonce-${nonce}' 'strict-dynamic'${development}`;
+  const scripts = path === REFERENCE ? `'self' 'unsafe-inline'${development}` : `'self' 'nonce-${nonce}' 'strict-dynamic'${development}`;
   return [
     "default-src 'self'",
     `script-src ${scripts}`,

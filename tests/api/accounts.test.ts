@@ -1,10 +1,22 @@
+import { createHash } from "node:crypto";
 import request from "supertest";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, vi } from "vitest";
 import { testDatabase } from "../support/accounts";
-import { freshEmail, mailTo, openAccount, PASSWORD, portal, sessionOf, tokenSentTo } from "../support/portal";
+import { freshAddress, freshEmail, mailTo, openAccount, PASSWORD, portal, sessionOf, tokenSentTo } from "../support/portal";
 
 const signUp = { name: "Bram Achterlund", organisation: "Slateboard Software", password: PASSWORD };
 const keyRequest = { name: "Field app", environment: "sandbox", scopes: ["calculations"] };
+
+/** The middle of how many milliseconds several runs take. */
+async function medianOf(runs: number, run: () => PromiseLike<unknown>): Promise<number> {
+  const durations: number[] = [];
+  for (let index = 0; index < runs; index += 1) {
+    const start = performance.now();
+    await run();
+    durations.push(performance.now() - start);
+  }
+  return durations.sort((one, other) => one - other)[Math.floor(runs / 2)]!;
+}
 
 describe("opening an account", () => {
   it("goes from sign-up through the e-mail to a session", async () => {
@@ -49,6 +61,24 @@ describe("opening an account", () => {
     await portal("auth/verify-email", { token }).expect(410);
   });
 
+  it("takes as long for an address that has an account already", async () => {
+    const { email } = await openAccount();
+    const median = async (addressOf: () => string): Promise<number> => medianOf(7, () => portal("auth/sign-up", { ...signUp, email: addressOf() }).expect(201));
+    const [known, unknown] = [await median(() => email), await median(freshEmail)];
+    expect(Math.min(known, unknown)).toBeGreaterThan(140);
+    expect(Math.abs(known - unknown)).toBeLessThan(0.3 * Math.min(known, unknown));
+  });
+
+  it("keeps a link's token as a hash, good for its own purpose only", async () => {
+    const { email } = await openAccount();
+    await portal("auth/forgot-password", { email }).expect(202);
+    const token = await tokenSentTo(email, "reset-password");
+    const row = await testDatabase()("email_tokens").where({ token_hash: createHash("sha256").update(token).digest() }).first();
+    expect(row.purpose).toBe("reset_password");
+    expect(JSON.stringify(row)).not.toContain(token);
+    await portal("auth/verify-email", { token }).expect(410);
+  });
+
   it("makes no key before the e-mail is confirmed", async () => {
     const email = freshEmail();
     await portal("auth/sign-up", { ...signUp, email }).expect(201);
@@ -65,11 +95,21 @@ describe("signing in", () => {
     expect({ ...wrong.body, requestId: "" }).toEqual({ ...unknown.body, requestId: "" });
   });
 
+  it("takes as long for an unknown address as for a wrong password", async () => {
+    const { email } = await openAccount();
+    const median = async (addressOf: () => string): Promise<number> => medianOf(15, () => portal("auth/sign-in", { email: addressOf(), password: "not the password" }).expect(401));
+    const [known, unknown] = [await median(() => email), await median(freshEmail)];
+    // Without a hash to compare with, an unknown address would be answered in a fraction of the time.
+    expect(unknown / known).toBeGreaterThan(0.6);
+    expect(unknown / known).toBeLessThan(1.6);
+  });
+
   it("gives a cookie that scripts and other sites cannot use, new at every sign-in", async () => {
     const { email, cookie } = await openAccount();
     const answer = await portal("auth/sign-in", { email, password: PASSWORD }, cookie).expect(200);
     const [set] = answer.headers["set-cookie"] as unknown as string[];
-    expect(set).toMatch(/; Path=\/; HttpOnly; SameSite=Lax/);
+    // Without Secure, because the address of the tests is this very machine's.
+    expect(set).toMatch(/^averduct_session=[\w-]{43}; Max-Age=1209600; Path=\/; HttpOnly; SameSite=Lax$/);
     expect(sessionOf(answer)).not.toBe(cookie);
   });
 
@@ -82,12 +122,13 @@ describe("signing in", () => {
 
   it("stops an account from one address after too many failures, however right the password then is", async () => {
     const { email } = await openAccount();
-    for (let attempt = 0; attempt < 8; attempt += 1) await portal("auth/sign-in", { email, password: "not the password" }).expect(401);
-    const stopped = await portal("auth/sign-in", { email, password: PASSWORD }).expect(429);
+    const from = freshAddress();
+    for (let attempt = 0; attempt < 8; attempt += 1) await portal("auth/sign-in", { email, password: "not the password" }, undefined, from).expect(401);
+    const stopped = await portal("auth/sign-in", { email, password: PASSWORD }, undefined, from).expect(429);
     expect(Number(stopped.headers["retry-after"])).toBeGreaterThan(0);
     // The count is the address's and the account's together; another account from here is not stopped.
     const other = await openAccount();
-    await portal("auth/sign-in", { email: other.email, password: PASSWORD }).expect(200);
+    await portal("auth/sign-in", { email: other.email, password: PASSWORD }, undefined, from).expect(200);
   });
 
   it("ends a session at sign-out", async () => {
@@ -110,12 +151,68 @@ describe("resetting a password", () => {
   });
 
   it("says nothing of whether an address has an account", async () => {
-    await portal("auth/forgot-password", { email: freshEmail() }).expect(202, {});
+    const { email } = await openAccount();
+    const [unknown, known] = [await portal("auth/forgot-password", { email: freshEmail() }), await portal("auth/forgot-password", { email })];
+    for (const answer of [unknown, known]) expect([answer.status, answer.body]).toEqual([202, {}]);
+    expect(Object.keys(unknown.headers).sort()).toEqual(Object.keys(known.headers).sort());
+  });
+
+  it("refuses an expired link, and one that a newer took the place of", async () => {
+    const { email } = await openAccount();
+    await portal("auth/forgot-password", { email }).expect(202);
+    const first = await tokenSentTo(email, "reset-password");
+    await portal("auth/forgot-password", { email }).expect(202);
+    const second = await vi.waitUntil(async () => {
+      const newest = await tokenSentTo(email, "reset-password");
+      return newest !== first && newest;
+    }, { timeout: 5_000 });
+    await portal("auth/reset-password", { token: first, password: "another set of words" }).expect(410);
+    await testDatabase()("email_tokens").where({ token_hash: createHash("sha256").update(second).digest() }).update({ expires_at: new Date(Date.now() - 1_000) });
+    await portal("auth/reset-password", { token: second, password: "another set of words" }).expect(410);
+    await portal("auth/sign-in", { email, password: PASSWORD }).expect(200);
+  });
+
+  it("proves the address, and ends the link that would have", async () => {
+    const email = freshEmail();
+    await portal("auth/sign-up", { ...signUp, email }).expect(201);
+    const confirmation = await tokenSentTo(email);
+    await portal("auth/forgot-password", { email }).expect(202);
+    await portal("auth/reset-password", { token: await tokenSentTo(email, "reset-password"), password: "another set of words" }).expect(200);
+    await portal("auth/verify-email", { token: confirmation }).expect(410);
+    const cookie = sessionOf(await portal("auth/sign-in", { email, password: "another set of words" }).expect(200));
+    await portal("keys", keyRequest, cookie).expect(201);
+  });
+
+  it.each([
+    ["its e-mail address", (email: string) => email.toUpperCase()],
+    ["its name", () => "bram achterlund"],
+  ])("does not take %s for a password", async (_, passwordOf) => {
+    const { email } = await openAccount();
+    await portal("auth/forgot-password", { email }).expect(202);
+    const token = await tokenSentTo(email, "reset-password");
+    expect((await portal("auth/reset-password", { token, password: passwordOf(email) }).expect(422)).body.errors[0].pointer).toBe("/password");
+  });
+});
+
+describe("the audit log", () => {
+  it("has who did what from where", async () => {
+    const { email, cookie } = await openAccount();
+    const from = freshAddress();
+    await portal("auth/sign-in", { email, password: "not the password" }, undefined, from).expect(401);
+    await portal("auth/sign-in", { email, password: PASSWORD }, undefined, from).expect(200);
+    await portal("auth/sign-out", {}, cookie).expect(204);
+    await portal("auth/forgot-password", { email }).expect(202);
+    await portal("auth/reset-password", { token: await tokenSentTo(email, "reset-password"), password: "another set of words" }).expect(200);
+    const user = await testDatabase()("users").where({ email }).first();
+    const entries = await testDatabase()("audit_log").where({ actor_user_id: user.id }).orderBy("id");
+    expect(entries.map(({ action }) => action)).toEqual(["sign_up", "email_verified", "sign_in_refused", "sign_in", "sign_out", "password_reset_asked", "password_reset"]);
+    expect(entries[2]).toMatchObject({ subject: email, address: from });
+    expect(entries[3]).toMatchObject({ subject: user.id, address: from });
   });
 });
 
 describe("changes from another site", () => {
-  it.each<Record<string, string>>([{ Origin: "https://elsewhere.example" }, { Origin: "null" }, { "Sec-Fetch-Site": "cross-site" }])("are refused: %o", async (headers) => {
+  it.each<Record<string, string>>([{ Origin: "https://elsewhere.example" }, { Origin: "null" }, { "Sec-Fetch-Site": "cross-site" }, { "Sec-Fetch-Site": "same-site" }, { Origin: "http://localhost" }])("are refused: %o", async (headers) => {
     const { cookie } = await openAccount();
     const answer = await request(process.env.AVERDUCT_TEST_URL!).post("/api/portal/auth/sign-out").set("Cookie", cookie).set(headers).send();
     expect(answer.status).toBe(403);

@@ -14,8 +14,8 @@ export const PASSWORD = "plenum damper gauge ladder";
 /** An address of this machine that nobody else calls from: all of 127.0.0.0/8 is loopback on Linux. */
 export const freshAddress = (): string => `127.${randomInt(1, 255)}.${randomInt(256)}.${randomInt(1, 255)}`;
 
-/** Posts to one of the portal's own routes as its pages do, from an address of this machine. */
-export function portal(path: string, body: object | undefined = {}, cookie?: string, from = "127.0.0.1"): request.Test {
+/** Posts to one of the portal's own routes as its pages do, by default from an address of its own, so that one test does not use up another's attempts. */
+export function portal(path: string, body: object | undefined = {}, cookie?: string, from = freshAddress()): request.Test {
   const call = request(ORIGIN()).post(`/api/portal/${path}`).set("Origin", ORIGIN()).agent(new Agent({ localAddress: from, family: 4 }));
   if (cookie) call.set("Cookie", cookie);
   return call.send(body);
@@ -42,7 +42,7 @@ export async function tokenSentTo(email: string, page: "verify-email" | "reset-p
 
 /** Opens an account, confirms its e-mail and returns the session. */
 export async function openAccount(email = freshEmail()): Promise<{ email: string; cookie: string }> {
-  await portal("auth/sign-up", { email, name: "Bram Achterlund", organisation: "Slateboard Software", password: PASSWORD }, undefined, freshAddress()).expect(201);
+  await portal("auth/sign-up", { email, name: "Bram Achterlund", organisation: "Slateboard Software", password: PASSWORD }).expect(201);
   const answer = await portal("auth/verify-email", { token: await tokenSentTo(email) }).expect(200);
   return { email, cookie: sessionOf(answer)! };
 }
