@@ -5,14 +5,14 @@ import { inBackground } from "@/lib/runtime/background";
 import { callerNetwork, renew, spend } from "./allowance";
 import { recordAudit } from "./audit";
 import { passwordChanged } from "./letters";
-import { hashPassword, isPassword, requireGoodPassword } from "./password";
+import { hashPassword, isPassword, requireUnlike } from "./password";
 import type { SignedIn } from "./session";
 import { setPassword } from "./setPassword";
 
 /** Changes the password of somebody who knows the current one, and ends their other sessions. */
 export async function changePassword(person: SignedIn, { currentPassword, newPassword }: { currentPassword: string; newPassword: string }): Promise<void> {
   const { userId, email, sessionId, organisation } = person;
-  requireGoodPassword(newPassword, person, "/newPassword");
+  requireUnlike(person, newPassword, "/newPassword");
   await spend("signInToAccount", email, callerNetwork());
   const user = await database()("users").where({ id: userId }).first<{ password_hash: string } | undefined>("password_hash");
   if (!(await isPassword(currentPassword, user?.password_hash))) {

@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { PASSWORD_NOT_ACCEPTED, passwordFault } from "./password";
 
 /** Fields that several of the portal's forms have. */
 
@@ -11,3 +12,8 @@ export const personName = z
   .regex(/./u, "This must not be empty.")
   .max(120)
   .regex(/^\P{Cc}*$/u, "Control characters are not taken here.");
+
+export const newPassword = z.string().superRefine((password, context) => {
+  const message = passwordFault(password);
+  if (message) context.addIssue({ code: "custom", message, params: { code: PASSWORD_NOT_ACCEPTED } });
+});

@@ -6,6 +6,8 @@ import { inHashingLine } from "./hashingLine";
 /** argon2id, the package's default algorithm, with the parameters that OWASP recommends at least. */
 const PARAMETERS = { memoryCost: 19 * 1024, timeCost: 2, parallelism: 1 };
 
+export const PASSWORD_NOT_ACCEPTED = "password_not_accepted";
+
 const LEAST_LENGTH = 10;
 const MOST_LENGTH = 200;
 /** The commonest of the passwords that are long enough. */
@@ -26,17 +28,17 @@ export async function isPassword(password: string, passwordHash: string | undefi
   return fits && passwordHash !== undefined;
 }
 
-/** Throws, with the field at fault, where a password may not be chosen. */
-export function requireGoodPassword(password: string, person: { email: string; name: string }, pointer = "/password"): void {
-  const detail = faultOf(password, person);
-  if (detail) throw new Problem("invalid-request", { detail, errors: [{ pointer, code: "password_not_accepted", detail }] });
-}
-
-function faultOf(password: string, { email, name }: { email: string; name: string }): string | null {
-  const lower = password.toLowerCase();
+/** Why nobody may choose a password, in words for its field; null where it may be chosen. */
+export function passwordFault(password: string): string | null {
   if (password.length < LEAST_LENGTH) return `Use at least ${LEAST_LENGTH} characters. A few unrelated words are easy to remember.`;
   if (password.length > MOST_LENGTH) return `Use at most ${MOST_LENGTH} characters.`;
-  if (COMMON.has(lower)) return "This password is among the commonest. Choose another.";
-  if (lower === email.toLowerCase() || lower === name.toLowerCase()) return "Do not use your name or e-mail address as the password.";
+  if (COMMON.has(password.toLowerCase())) return "This password is among the commonest. Choose another.";
   return null;
+}
+
+/** Throws, with the field at fault, where a password is the person's own name or e-mail address. */
+export function requireUnlike({ email, name }: { email: string; name: string }, password: string, pointer = "/password"): void {
+  if (![email, name].some((known) => known.toLowerCase() === password.toLowerCase())) return;
+  const detail = "Do not use your name or e-mail address as the password.";
+  throw new Problem("invalid-request", { detail, errors: [{ pointer, code: PASSWORD_NOT_ACCEPTED, detail }] });
 }

@@ -5,7 +5,7 @@ import { callerNetwork, maySpend, renew, spend } from "./allowance";
 import { recordAudit } from "./audit";
 import { createEmailToken, ownerOfEmailToken, redeemEmailToken } from "./emailToken";
 import { passwordChanged, resetLink } from "./letters";
-import { hashPassword, requireGoodPassword } from "./password";
+import { hashPassword, requireUnlike } from "./password";
 import { setPassword } from "./setPassword";
 
 /** Sends a reset link where the address has an account; neither the answer nor its duration says whether it has. */
@@ -27,7 +27,7 @@ async function sendResetLink(userId: string, email: string): Promise<void> {
 export async function resetPassword({ token, password }: { token: string; password: string }): Promise<void> {
   const userId = await ownerOfEmailToken(token, "reset_password");
   const user = (await database()("users").where({ id: userId }).first<{ email: string; name: string }>("email", "name"))!;
-  requireGoodPassword(password, user);
+  requireUnlike(user, password);
   // Outside the transaction: waiting in line to hash must not hold a connection.
   const passwordHash = await hashPassword(password);
   await database().transaction(async (db) => {

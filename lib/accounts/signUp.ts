@@ -7,7 +7,7 @@ import { callerNetwork, maySpend, spend } from "./allowance";
 import { recordAudit } from "./audit";
 import { createEmailToken } from "./emailToken";
 import { alreadyKnown, confirmAddress } from "./letters";
-import { hashPassword, requireGoodPassword } from "./password";
+import { hashPassword, requireUnlike } from "./password";
 
 export interface SignUpInput {
   email: string;
@@ -25,7 +25,7 @@ const LEAST_MS = 150;
  * the owner of the address is told by e-mail, so that nobody learns who has an account.
  */
 export async function signUp(input: SignUpInput): Promise<void> {
-  requireGoodPassword(input.password, input);
+  requireUnlike(input, input.password);
   await spend("signUp", callerNetwork());
   const passwordHash = await hashPassword(input.password);
   const [userId] = await Promise.all([storeAccount(input, passwordHash), pause(LEAST_MS)]);

@@ -44,6 +44,11 @@ describe("opening an account", () => {
     expect(body.errors[0].pointer).toBe(pointer);
   });
 
+  it("names every field at fault at once", async () => {
+    const { body } = await portal("auth/sign-up", { email: "somebody", name: "", organisation: "", password: "short" }).expect(422);
+    expect(body.errors.map(({ pointer }: { pointer: string }) => pointer).sort()).toEqual(["/email", "/name", "/organisation", "/password"]);
+  });
+
   it("takes a link once", async () => {
     const email = freshEmail();
     await portal("auth/sign-up", { ...signUp, email }).expect(201);
@@ -59,6 +64,12 @@ describe("opening an account", () => {
     const user = await testDatabase()("users").where({ email }).first();
     await testDatabase()("email_tokens").where({ user_id: user.id }).update({ expires_at: new Date(Date.now() - 1_000) });
     await portal("auth/verify-email", { token }).expect(410);
+  });
+
+  it("keeps the password as an argon2id hash with the parameters of OWASP's Password Storage Cheat Sheet", async () => {
+    const { email } = await openAccount();
+    const { password_hash: stored } = await testDatabase()("users").where({ email }).first();
+    expect(stored).toMatch(/^\$argon2id\$v=19\$m=19456,t=2,p=1\$/);
   });
 
   it("takes as long for an address that has an account already", async () => {

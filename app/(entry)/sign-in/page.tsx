@@ -15,12 +15,14 @@ export default async function SignInPage({ searchParams }: PageProps<"/sign-in">
   if (person?.organisation || person?.isAdministrator) redirect(target);
   return (
     <PlainSheet title="Sign in">
-      {person && (
-        <Notice kind="caution" title="No organisation">
-          You are signed in as {person.email}, who belongs to no organisation any more. Ask an owner to invite you, or sign in as somebody else.
-        </Notice>
-      )}
-      <SignInForm next={target} passwordWasReset={reset !== undefined} />
+      <div className="grid gap-4">
+        {person && (
+          <Notice kind="caution" title="No organisation">
+            You are signed in as {person.email}, who belongs to no organisation any more. Ask an owner to invite you, or sign in as somebody else.
+          </Notice>
+        )}
+        <SignInForm next={target} passwordWasReset={reset !== undefined} />
+      </div>
     </PlainSheet>
   );
 }
