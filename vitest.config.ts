@@ -7,7 +7,7 @@ export default defineConfig({
   resolve: { alias: { "@": root.replace(/\/$/, "") } },
   test: {
     projects: [
-      { extends: true, test: { name: "engine", include: ["tests/engine/**/*.test.ts", "tests/reference/**/*.test.ts", "tests/units/**/*.test.ts"] } },
+      { extends: true, test: { name: "engine", include: ["tests/engine/**/*.test.ts", "tests/reference/**/*.test.ts", "tests/units/**/*.test.ts"], setupFiles: ["tests/support/properties.ts"] } },
       {
         extends: true,
         test: {

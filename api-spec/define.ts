@@ -49,8 +49,8 @@ export interface OperationDefinition<
   examples?: Example<z.input<Body>>[];
   /** Problems beyond those that authentication, limits and validation bring by themselves. */
   problems?: ProblemSlug[];
-  /** The answer can also be had as a drawing, with `Accept: image/svg+xml`. */
-  figure?: boolean;
+  /** What the drawing shows, where the answer can also be had as one with `Accept: image/svg+xml`. */
+  figure?: string;
   /** Largest accepted body; 1 MiB when left out. */
   maxBodyBytes?: number;
 }

@@ -77,6 +77,13 @@ function examplesOf(definition: OperationDefinition): { request: Record<string, 
   return { request, answer };
 }
 
+const describe = ({ description, figure, scope }: OperationDefinition): string =>
+  [
+    description,
+    ...(figure ? [`With \`Accept: image/svg+xml\` the answer is a drawing. ${figure}`] : []),
+    ...(scope ? [`Needs the scope \`${scope}\`.`] : []),
+  ].join("\n\n");
+
 function register(registry: OpenAPIRegistry, definition: OperationDefinition): void {
   const examples = examplesOf(definition);
   const status = String(definition.status ?? 200);
@@ -86,7 +93,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
     operationId: definition.id,
     tags: [definition.tag],
     summary: definition.summary,
-    description: definition.scope ? `${definition.description}\n\nNeeds the scope \`${definition.scope}\`.` : definition.description,
+    description: describe(definition),
     security: definition.scope === null ? [] : [{ apiKey: [] }],
     request: {
       ...(definition.params && { params: definition.params as z.ZodObject }),
@@ -108,7 +115,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
         ...(status !== "204" && {
           content: {
             "application/json": { schema: definition.answer, ...(examples && { examples: examples.answer }) },
-            ...(definition.figure && { "image/svg+xml": { schema: { type: "string" as const, description: "The same as a drawing." } } }),
+            ...(definition.figure && { "image/svg+xml": { schema: { type: "string" as const, description: definition.figure } } }),
           },
         }),
       },

@@ -41,6 +41,7 @@ export const airflow = defineOperation({
     })
     .meta({ id: "AirflowAnswer" }),
   problems: ["impossible-input"],
+  figure: "The cross-section to scale with each reading where it was taken, coloured by velocity, suspected slips ringed.",
   examples: [
     {
       name: "supply-main",

@@ -45,7 +45,7 @@ export const check = z
   .strictObject({
     code: z.enum([
       "points_below_minimum", "uniformity", "negative_reading", "low_velocity", "site_disturbance", "profile_asymmetry", "possible_slip",
-      "density_assumed", "probe_blockage", "compressibility", "near_wall", "duct_below_minimum",
+      "density_assumed", "probe_blockage", "compressibility", "near_wall", "duct_below_minimum", "probe_length",
     ]).describe("Stable code of the check."),
     passed: z.boolean().describe("Whether what was found is within the limit."),
     severity: z.enum(["information", "caution", "failure"]).describe("How much it weighs when it is not passed."),

@@ -65,9 +65,6 @@ const siteRule = z
   })
   .meta({ id: "SiteRule", description: "The straight lengths of a standard, and whether the site has them." });
 
-/** A check's codes, and the one that only a plan has. */
-const planCheck = check.extend({ code: z.enum([...check.shape.code.options, "probe_length"]) }).meta({ id: "PlanCheck", description: "A check of the plan, with what was compared." });
-
 const inches = (value: number) => ({ value, unit: "in" as const });
 
 export const traversePlan = defineOperation({
@@ -106,12 +103,13 @@ export const traversePlan = defineOperation({
         upstreamDiameters: z.number().nullable(),
         rules: z.array(siteRule),
       }),
-      checks: z.array(planCheck),
+      checks: z.array(check),
       cautions: z.array(z.string()).readonly().describe("What to heed before drilling and after."),
       working,
     })
     .meta({ id: "TraversePlanAnswer" }),
   problems: ["impossible-input"],
+  figure: "A sheet for the site: the cross-section to scale with holes, depths and numbered points, the marks for the probe, and a blank box for each reading.",
   examples: [
     {
       name: "lined-rectangular",

@@ -2,7 +2,7 @@ import type { z } from "zod";
 import type { OperationDefinition } from "@/api-spec/define";
 import type { Key } from "@/lib/keys/keyDirectory";
 import { problemResponse } from "@/lib/problems/problem";
-import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, toProblem, withHeaders } from "./passage";
+import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, svgAnswer, toProblem, withHeaders } from "./passage";
 import { readJson } from "./requestBody";
 import { validate } from "./validation";
 
@@ -34,7 +34,7 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
   definition: OperationDefinition<Body, Answer, Query, Params>,
   run: (call: Call<z.output<Body>, z.output<Query>, z.output<Params>>) => z.input<Answer> | Promise<z.input<Answer>>,
   /** Draws the answer, for operations whose definition has a figure. */
-  draw?: (input: z.output<Body>) => string,
+  draw?: (input: z.output<Body>, answer: z.input<Answer>) => string,
 ): Handler {
   return async (request, context) => {
     const passage = beginPassage();
@@ -47,14 +47,12 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
         key: passage.key,
         requestId: passage.requestId,
       } as Call<z.output<Body>, z.output<Query>, z.output<Params>>;
-      if (draw && prefersSvg(request)) {
-        const drawing = Buffer.from(draw(call.input));
-        endPassage(definition, passage, 200, null);
-        return new Response(drawing, { headers: { ...passageHeaders(passage), "Content-Type": "image/svg+xml; charset=utf-8", Vary: "Accept" } });
-      }
       const answer = await run(call);
       const status = definition.status ?? 200;
-      const response = status === 204 ? new Response(null, { status, headers: passageHeaders(passage) }) : jsonAnswer(answer, status, passage);
+      const response =
+        draw && prefersSvg(request) ? svgAnswer(draw(call.input, answer), passage)
+        : status === 204 ? new Response(null, { status, headers: passageHeaders(passage) })
+        : jsonAnswer(answer, status, passage);
       endPassage(definition, passage, status, null);
       return response;
     } catch (error) {

@@ -54,6 +54,10 @@ export function withHeaders(response: Response, passage: Passage): Response {
 export const jsonAnswer = (answer: unknown, status: number, passage: Passage): Response =>
   new Response(oneChunk(Buffer.from(JSON.stringify(answer))), { status, headers: { ...passageHeaders(passage), "Content-Type": "application/json" } });
 
+/** A drawing with the headers that every answer has. */
+export const svgAnswer = (drawing: string, passage: Passage): Response =>
+  new Response(oneChunk(Buffer.from(drawing)), { headers: { ...passageHeaders(passage), "Content-Type": "image/svg+xml; charset=utf-8", "Content-Security-Policy": "default-src 'none'; style-src 'unsafe-inline'", Vary: "Accept" } });
+
 /** A body in one piece. A response makes a stream of bytes of a string or a buffer, which costs several times as much to pass on. */
 const oneChunk = (bytes: Uint8Array): ReadableStream<Uint8Array> =>
   new ReadableStream({

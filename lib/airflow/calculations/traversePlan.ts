@@ -1,7 +1,8 @@
+import type { Check } from "../checks/check";
 import type { Edge, Face, LayoutPoint, TraverseLine } from "../layout/line";
 import { CAUTIONS } from "../layout/cautions";
 import { planTraverse, type PlanInput, type TraversePlan } from "../layout/plan";
-import { planChecks, type PlanCheck } from "../layout/planChecks";
+import { planChecks } from "../layout/planChecks";
 import { meetsSiteRule, SITE_RULES, type SiteRule } from "../layout/siteLengths";
 import type { AnswerOptions, LayoutRule } from "../types";
 import { inAnswerUnits } from "../units/convert";
@@ -65,7 +66,7 @@ export interface TraversePlanAnswer {
   inside: InsideAnswer;
   hydraulicDiameter: QuantityOf<"length">;
   site: PlannedSite;
-  checks: PlanCheck[];
+  checks: Check[];
   cautions: readonly string[];
   working?: WorkingStep[];
 }

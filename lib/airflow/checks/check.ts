@@ -10,7 +10,8 @@ export type CheckCode =
   | "probe_blockage"
   | "compressibility"
   | "near_wall"
-  | "duct_below_minimum";
+  | "duct_below_minimum"
+  | "probe_length";
 
 /** How much a failed check weighs: `information` to know, `caution` to look at, `failure` not acceptable as it stands. */
 export type Severity = "information" | "caution" | "failure";

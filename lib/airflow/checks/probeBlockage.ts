@@ -1,7 +1,8 @@
 import type { InsideDuct } from "../duct/insideDuct";
 import { requireWithin } from "../errors";
 import { toSi } from "../units/convert";
-import type { CheckFunction } from "./context";
+import type { Check } from "./check";
+import type { CheckContext } from "./context";
 
 const GREATEST_RATIO = 0.02;
 /** In m. */
@@ -19,7 +20,7 @@ const smallestDimension = (inside: InsideDuct): number => {
 };
 
 /** Whether the probe is thin enough not to change the flow it measures. */
-export const probeBlockage: CheckFunction = ({ inside, probe }) => {
+export const probeBlockage = ({ inside, probe }: Pick<CheckContext, "inside" | "probe">): Check | null => {
   if (!inside || !probe?.diameter) return null;
   const diameter = requireWithin(toSi("length", probe.diameter), DIAMETER_LIMITS, {
     path: ["probe", "diameter"], code: "probe_diameter_out_of_range", detail: "A probe diameter of 0 to 1 m is taken. Check the unit.",

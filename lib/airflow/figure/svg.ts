@@ -21,6 +21,9 @@ export const text = (words: string, attributes: Attributes): string => element("
 export const strokes = (lines: readonly (readonly (readonly [number, number])[])[], attributes: Attributes): string =>
   element("path", { d: lines.map((line) => line.map(([x, y], index) => `${index === 0 ? "M" : "L"}${written(x)} ${written(y)}`).join("")).join(""), fill: "none", ...attributes });
 
+/** A drawing that is a document of its own prints on one page, however long it is; in a page, the page decides. */
+const PRINTED_WHOLE = "<style>@media print{@page{margin:12mm}svg:root{width:100%;height:auto;max-height:99vh}}</style>";
+
 /** A whole drawing: named, described in words, its colours those of the page it stands on or else those of paper. */
 export function drawing(size: { width: number; height: number }, words: { title: string; description: string }, ...children: string[]): string {
   const { width, height } = size;
@@ -29,6 +32,7 @@ export function drawing(size: { width: number; height: number }, words: { title:
     { xmlns: "http://www.w3.org/2000/svg", role: "img", viewBox: `0 0 ${written(width)} ${written(height)}`, width, height, "font-family": MONO, "font-size": FONT_SIZE, fill: INK },
     element("title", {}, escapeText(words.title)),
     element("desc", {}, escapeText(words.description)),
+    PRINTED_WHOLE,
     ...children,
   );
 }

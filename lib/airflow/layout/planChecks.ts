@@ -1,5 +1,4 @@
-import type { Check, CheckCode } from "../checks/check";
-import type { CheckContext } from "../checks/context";
+import type { Check } from "../checks/check";
 import { probeBlockage } from "../checks/probeBlockage";
 import { inAnswerUnits } from "../units/convert";
 import type { UnitSystem } from "../units/units";
@@ -9,17 +8,13 @@ import { METHOD_1_LEAST_DIAMETER, wallLimit } from "./method1";
 import type { TraversePlan } from "./plan";
 import { meetsSiteRule, SITE_RULES } from "./siteLengths";
 
-/** A check of a plan: those of a result that need no readings, and whether the probe is long enough. */
-export interface PlanCheck extends Omit<Check, "code"> {
-  code: CheckCode | "probe_length";
-}
-type PlanCheckFunction = (plan: TraversePlan, system: UnitSystem) => PlanCheck | null;
+type PlanCheckFunction = (plan: TraversePlan, system: UnitSystem) => Check | null;
 
 const METHOD_1 = "40 CFR Part 60, Appendix A-1, Method 1";
 const HAIR = 1e-9;
 
 /** Every check that applies to a plan, in a fixed order. */
-export const planChecks = (plan: TraversePlan, system: UnitSystem): PlanCheck[] =>
+export const planChecks = (plan: TraversePlan, system: UnitSystem): Check[] =>
   [enoughPoints, nearWall, largeEnough, siteDisturbance, thinEnough, longEnough].map((check) => check(plan, system)).filter((check) => check !== null);
 
 /** A length in the answer's unit, for a check's comparison and its words. */
@@ -99,9 +94,7 @@ function siteDetail(passed: boolean, tooNear: boolean, bothKnown: boolean, short
   return `The plane is too near a disturbance: ${shortfall}. Move it, or count on a larger uncertainty.`;
 }
 
-/** The result's own check, which looks at nothing but duct and probe. */
-const thinEnough: PlanCheckFunction = ({ inside, probe }) =>
-  (probeBlockage as (context: Pick<CheckContext, "inside" | "probe">) => Check | null)({ inside, probe });
+const thinEnough: PlanCheckFunction = ({ inside, probe }) => probeBlockage({ inside, probe });
 
 const longEnough: PlanCheckFunction = ({ probeLength, givenProbeLength }, system) => {
   if (givenProbeLength === null) return null;
