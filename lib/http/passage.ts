@@ -51,21 +51,26 @@ export function withHeaders(response: Response, passage: Passage): Response {
 }
 
 /** A JSON answer with the headers that every answer has. */
-export const jsonAnswer = (answer: unknown, status: number, passage: Passage): Response =>
-  new Response(oneChunk(Buffer.from(JSON.stringify(answer))), { status, headers: { ...passageHeaders(passage), "Content-Type": "application/json" } });
+export const jsonAnswer = (answer: unknown, status: number, passage: Passage): Response => wholeAnswer(JSON.stringify(answer), status, { ...passageHeaders(passage), "Content-Type": "application/json" });
 
 /** A drawing with the headers that every answer has. */
 export const svgAnswer = (drawing: string, passage: Passage): Response =>
-  new Response(oneChunk(Buffer.from(drawing)), { headers: { ...passageHeaders(passage), "Content-Type": "image/svg+xml; charset=utf-8", "Content-Security-Policy": "default-src 'none'; style-src 'unsafe-inline'", Vary: "Accept" } });
+  wholeAnswer(drawing, 200, { ...passageHeaders(passage), "Content-Type": "image/svg+xml; charset=utf-8", "Content-Security-Policy": "default-src 'none'; style-src 'unsafe-inline'", Vary: "Accept" });
 
-/** A body in one piece. A response makes a stream of bytes of a string or a buffer, which costs several times as much to pass on. */
-const oneChunk = (bytes: Uint8Array): ReadableStream<Uint8Array> =>
-  new ReadableStream({
+/**
+ * An answer whose body is at hand, in one piece.
+ * A response makes a stream of bytes of a string or a buffer, which costs several times as much to pass on.
+ */
+function wholeAnswer(text: string, status: number, headers: Record<string, string>): Response {
+  const bytes = Buffer.from(text);
+  const body = new ReadableStream({
     start(controller) {
       controller.enqueue(bytes);
       controller.close();
     },
   });
+  return new Response(body, { status, headers });
+}
 
 /** Counts a request once its outcome is known. */
 export function endPassage(definition: OperationDefinition, passage: Passage, status: number, problem: string | null): void {

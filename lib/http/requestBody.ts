@@ -29,8 +29,13 @@ function requireJsonType(contentType: string | null): void {
 
 async function readText(request: Request, maxBytes: number): Promise<string> {
   const declared = request.headers.get("content-length");
-  if (declared !== null && Number(declared) <= maxBytes) return request.text();
-  return readUpTo(request, maxBytes);
+  try {
+    return declared !== null && Number(declared) <= maxBytes ? await request.text() : await readUpTo(request, maxBytes);
+  } catch (error) {
+    if (!request.signal.aborted) throw error;
+    const detail = "The connection was closed before the whole body had come.";
+    throw new Problem("malformed-json", { detail, errors: [{ pointer: "", code: "body_incomplete", detail }] });
+  }
 }
 
 /** Reads a body of unknown length, or one declared too large, without ever holding more than the limit. */

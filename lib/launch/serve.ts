@@ -7,6 +7,7 @@ import { config } from "@/lib/runtime/config";
 import { log } from "@/lib/runtime/log";
 import { runShutdownTasks } from "@/lib/runtime/shutdown";
 import { startHousekeeping } from "./housekeeping";
+import { mountCalculations } from "./mounted";
 
 /** Requests that are still running after this are cut off. */
 const STOP_TIMEOUT_MS = 9_000;
@@ -22,12 +23,15 @@ function addressOf(request: IncomingMessage): string {
 async function serve(): Promise<void> {
   const { HOST, PORT, LOG_LEVEL } = config();
   const server = createServer();
-  const app = next({ dev: process.env.NODE_ENV === "development", hostname: HOST, port: PORT, httpServer: server, quiet: true });
+  const development = process.env.NODE_ENV === "development";
+  const app = next({ dev: development, hostname: HOST, port: PORT, httpServer: server, quiet: true });
   await app.prepare();
   const handle = app.getRequestHandler();
+  // In development Next.js serves all of it, so that every change shows.
+  const mountedFor = development ? () => undefined : await mountCalculations();
   server.on("request", (request, response) => {
     const address = addressOf(request);
-    void withCaller(address, () => handle(request, response));
+    void withCaller(address, () => (mountedFor(request) ?? handle)(request, response));
   });
   await listen(server, HOST, PORT);
   log().info({ host: HOST, port: PORT, level: LOG_LEVEL }, "listening");

@@ -5,6 +5,7 @@ import { averageVelocity } from "@/lib/airflow/calculations/averageVelocity";
 import { densityCorrection } from "@/lib/airflow/calculations/densityCorrection";
 import { ductArea } from "@/lib/airflow/calculations/ductArea";
 import type { Air, Duct } from "@/lib/airflow/types";
+import { writtenResolution } from "@/lib/airflow/uncertainty/readingInfluences";
 import { fromSi, toSi } from "@/lib/airflow/units/convert";
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
@@ -148,5 +149,17 @@ describe("what must hold for any traverse", () => {
       const expanded = (by: number): number => airflow(grow(input, by)).uncertainty.expandedPercent;
       return expanded(less) <= expanded(less + more) + 1e-12;
     }));
+  });
+});
+
+describe("the step that readings were written to", () => {
+  const placesInText = (value: number): number => {
+    const [mantissa = "", exponent = "0"] = String(value).split("e");
+    return Math.min(12, Math.max(0, (mantissa.split(".")[1]?.length ?? 0) - Number(exponent)));
+  };
+  const written = fc.tuple(fc.integer({ min: -9_999_999, max: 9_999_999 }), fc.integer({ min: 0, max: 14 })).map(([whole, places]) => Number(`${whole}e-${places}`));
+
+  it("is one in the last decimal place of any of them", () => {
+    fc.assert(fc.property(fc.oneof(written, fc.double({ noNaN: true, noDefaultInfinity: true })), (value) => writtenResolution([[0, null], [value]]) === 10 ** -placesInText(value)));
   });
 });

@@ -104,8 +104,26 @@ export function writtenResolution(lines: readonly (readonly (number | null)[])[]
   return 10 ** -places;
 }
 
+const MOST_PLACES = 12;
+/** Below this the product with a power of ten is within half a unit of the whole number that was written, so that it rounds to it. */
+const LARGEST_SURE = 2 ** 51;
+const POWERS = Array.from({ length: MOST_PLACES }, (_, places) => 10 ** places);
+
+/**
+ * Places after the decimal point of a number as it is written, at most 12. A number has so many or fewer where the nearest
+ * decimal with so many is that very number: exact, because a quotient of two whole numbers is rounded correctly.
+ * The way over the number's digits as text takes ten times as long, and every reading of every traverse goes through here.
+ */
 function decimalPlaces(value: number): number {
-  if (Number.isInteger(value)) return 0;
+  for (const [places, power] of POWERS.entries()) {
+    const whole = Math.round(value * power);
+    if (!(Math.abs(whole) < LARGEST_SURE)) return decimalPlacesOfText(value);
+    if (whole / power === value) return places;
+  }
+  return MOST_PLACES;
+}
+
+function decimalPlacesOfText(value: number): number {
   const [mantissa = "", exponent = "0"] = String(value).split("e");
-  return Math.min(12, Math.max(0, (mantissa.split(".")[1]?.length ?? 0) - Number(exponent)));
+  return Math.min(MOST_PLACES, Math.max(0, (mantissa.split(".")[1]?.length ?? 0) - Number(exponent)));
 }

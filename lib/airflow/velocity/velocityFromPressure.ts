@@ -24,7 +24,7 @@ export const velocityFromPressure = (velocityPressure: number, density: number, 
  */
 export function compressibilityFactor(velocityPressure: number, absolutePressure: number): number {
   const ratio = velocityPressure / absolutePressure;
-  return Math.sqrt(1 - ratio / (2 * KAPPA) + ((KAPPA - 1) / (6 * KAPPA ** 2)) * ratio ** 2);
+  return Math.sqrt(1 - ratio / (2 * KAPPA) + ((KAPPA - 1) / (6 * KAPPA * KAPPA)) * ratio * ratio);
 }
 
 /**
