@@ -4,6 +4,7 @@ import { database } from "@/db/connection";
 import { prepareDatabase } from "@/db/prepare";
 import { newId } from "@/lib/ids/newId";
 import { createKey } from "@/lib/keys/createKey";
+import { Problem } from "@/lib/problems/problem";
 import { withDatabase } from "./withDatabase";
 import { CannotStart } from "./say.mjs";
 
@@ -46,6 +47,8 @@ export async function main(commandArguments: string[]): Promise<void> {
       expiresAt: days === null ? null : new Date(Date.now() + days * 86_400_000),
       allowedNetworks: networks ? networks.split(",").map((network) => network.trim()) : null,
       createdBy: null,
+    }).catch((error: unknown) => {
+      throw error instanceof Problem ? new CannotStart(error.message) : error;
     });
     console.log(text);
   });
