@@ -51,6 +51,8 @@ export interface OperationDefinition<
   problems?: ProblemSlug[];
   /** What the drawing shows, where the answer can also be had as one with `Accept: image/svg+xml`. */
   figure?: string;
+  /** Reads and changes a record that has a version: the answer has an ETag, and a change takes If-Match. */
+  versioned?: boolean;
   /** Largest accepted body; 1 MiB when left out. */
   maxBodyBytes?: number;
 }

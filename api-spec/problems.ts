@@ -75,6 +75,42 @@ export const PROBLEMS = {
     meaning: "The path exists but not with this HTTP method.",
     remedy: "Use a method listed in the Allow header.",
   },
+  "not-a-draft": {
+    status: 409,
+    title: "An issued record cannot be changed",
+    meaning: "The traverse was issued, superseded or voided. What was issued stays as it was issued.",
+    remedy: "Begin a revision with POST /traverses/{id}/revisions and change that, or void the record with a reason.",
+  },
+  "not-ready-to-issue": {
+    status: 409,
+    title: "The traverse is not ready to be issued",
+    meaning: "Something that a record has to have is missing. Everything that is missing is listed in errors, each with its place in the traverse.",
+    remedy: "Change the draft until nothing is missing, then issue it again.",
+  },
+  "not-issued": {
+    status: 409,
+    title: "Only an issued record can be voided or revised",
+    meaning: "The traverse is a draft, or was superseded or voided already.",
+    remedy: "Change or delete a draft; revise the traverse that superseded this one.",
+  },
+  "revision-open": {
+    status: 409,
+    title: "A revision is already being made",
+    meaning: "There is a draft that is to supersede this traverse; the detail names it.",
+    remedy: "Go on with that draft, or delete it.",
+  },
+  "still-in-use": {
+    status: 409,
+    title: "Others still refer to this",
+    meaning: "A project that holds traverses, or an instrument that traverses were taken with, cannot be deleted.",
+    remedy: "Delete the drafts that refer to it first. What an issued record refers to stays.",
+  },
+  "precondition-failed": {
+    status: 412,
+    title: "Somebody changed it in the meantime",
+    meaning: "The ETag in If-Match is not that of the record as it is now, so nothing was changed.",
+    remedy: "Read the record again, look at what was changed, and repeat your change with the new ETag.",
+  },
   "body-too-large": {
     status: 413,
     title: "The body is too large",
@@ -92,6 +128,12 @@ export const PROBLEMS = {
     title: "The request does not fit the operation",
     meaning: "The body is JSON, but fields are missing, unknown, of the wrong type, in a unit that does not belong, or out of bounds. Each is listed in errors.",
     remedy: "Mend every field listed in errors; each pointer is a JSON Pointer (RFC 6901) into the body.",
+  },
+  "idempotency-key-reused": {
+    status: 422,
+    title: "The Idempotency-Key was used for another request",
+    meaning: "Within the last 24 hours a request with this Idempotency-Key had another method, path or body.",
+    remedy: "Make a new Idempotency-Key for each request, and use it again only to repeat that very request.",
   },
   "impossible-input": {
     status: 422,

@@ -2,7 +2,7 @@ import type { z } from "zod";
 import type { OperationDefinition } from "@/api-spec/define";
 import type { Key } from "@/lib/keys/keyDirectory";
 import { problemResponse } from "@/lib/problems/problem";
-import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, svgAnswer, toProblem, withHeaders } from "./passage";
+import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, svgAnswer, toProblem, withHeaders, type Passage } from "./passage";
 import { readJson } from "./requestBody";
 import { validate } from "./validation";
 
@@ -18,6 +18,24 @@ export interface Call<Body, Query, Params> {
 
 /** A plain web handler. `params` are the parts of the path, as Next.js passes them. */
 export type Handler = (request: Request, context: { params: Promise<Record<string, string>> }) => Promise<Response>;
+
+type Context = Parameters<Handler>[1];
+
+/** Everything that the caller sent, validated. */
+export async function readCall<Body extends z.ZodType, Answer extends z.ZodType, Query extends z.ZodType, Params extends z.ZodType>(
+  definition: OperationDefinition<Body, Answer, Query, Params>,
+  request: Request,
+  context: Context,
+  passage: Passage,
+): Promise<Call<z.output<Body>, z.output<Query>, z.output<Params>>> {
+  return {
+    input: definition.body && validate(definition.body, await readJson(request, definition.maxBodyBytes)),
+    query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),
+    params: definition.params && validate(definition.params, await context.params, "path"),
+    key: passage.key,
+    requestId: passage.requestId,
+  } as Call<z.output<Body>, z.output<Query>, z.output<Params>>;
+}
 
 /** Whether the caller asks for the drawing and not, or not rather, for JSON. */
 function prefersSvg(request: Request): boolean {
@@ -40,13 +58,7 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
     const passage = beginPassage();
     try {
       await admit(request, definition, passage);
-      const call = {
-        input: definition.body && validate(definition.body, await readJson(request, definition.maxBodyBytes)),
-        query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),
-        params: definition.params && validate(definition.params, await context.params, "path"),
-        key: passage.key,
-        requestId: passage.requestId,
-      } as Call<z.output<Body>, z.output<Query>, z.output<Params>>;
+      const call = await readCall(definition, request, context, passage);
       const answer = await run(call);
       const status = definition.status ?? 200;
       const response =
