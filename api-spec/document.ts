@@ -34,11 +34,25 @@ const KEY_PROBLEMS: ProblemSlug[] = [
 ];
 const BODY_PROBLEMS: ProblemSlug[] = ["malformed-json", "body-too-large", "unsupported-media-type", "invalid-request"];
 
+/** Whether an operation makes something that a repeated request should not make twice. */
+const takesIdempotencyKey = ({ method, scope }: OperationDefinition): boolean => method === "post" && scope !== null && scope !== "calculations";
+const takesIfMatch = ({ method, versioned, status }: OperationDefinition): boolean => versioned === true && method !== "get" && status !== 201;
+
+/** The headers that an operation reads, as the document has them. */
+function headersOf(definition: OperationDefinition): z.ZodObject | undefined {
+  const headers = {
+    ...(takesIdempotencyKey(definition) && { "Idempotency-Key": z.string().max(200).optional().describe("A UUID of yours. The same request with the same key within 24 hours is done once and answered alike.") }),
+    ...(takesIfMatch(definition) && { "If-Match": z.string().optional().describe("The ETag you saw; 412 where the record was changed since.") }),
+  };
+  return Object.keys(headers).length > 0 ? z.object(headers) : undefined;
+}
+
 /** All problems an operation can answer with. */
 export function problemsOf(definition: OperationDefinition): ProblemSlug[] {
   const slugs = [
     ...(definition.body ? BODY_PROBLEMS : []),
     ...(definition.query || definition.params ? (["invalid-request"] as const) : []),
+    ...(takesIdempotencyKey(definition) ? (["idempotency-key-reused"] as const) : []),
     ...(definition.problems ?? []),
     ...(definition.scope === null ? [] : KEY_PROBLEMS),
     ...COMMON_PROBLEMS,
@@ -98,6 +112,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
     request: {
       ...(definition.params && { params: definition.params as z.ZodObject }),
       ...(definition.query && { query: definition.query as z.ZodObject }),
+      ...(headersOf(definition) && { headers: headersOf(definition)! }),
       ...(definition.body && {
         body: { required: true, content: { "application/json": { schema: definition.body, ...(examples && { examples: examples.request }) } } },
       }),
@@ -107,6 +122,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
         description: "Done.",
         headers: {
           "Request-Id": { description: "Identifies this request in our logs.", schema: { type: "string" } },
+          ...(definition.versioned && status !== "204" && { ETag: { description: "Version of the record, for If-Match.", schema: { type: "string" } } }),
           ...(definition.scope !== null && {
             RateLimit: { description: "What is left of each limit, and the seconds until it is whole again.", schema: { type: "string" } },
             "RateLimit-Policy": { description: "The limits of the plan.", schema: { type: "string" } },

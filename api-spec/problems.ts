@@ -105,6 +105,18 @@ export const PROBLEMS = {
     meaning: "A project that holds traverses, or an instrument that traverses were taken with, cannot be deleted.",
     remedy: "Delete the drafts that refer to it first. What an issued record refers to stays.",
   },
+  "too-many-endpoints": {
+    status: 409,
+    title: "There are as many webhook endpoints as there may be",
+    meaning: "An environment takes at most 20 webhook endpoints.",
+    remedy: "Delete one that is no longer needed, or have one endpoint take several types of event.",
+  },
+  "endpoint-disabled": {
+    status: 409,
+    title: "The webhook endpoint is disabled",
+    meaning: "Nothing is delivered to an endpoint that is disabled; reading it tells since when and why.",
+    remedy: "Enable it with PATCH /webhook-endpoints/{id} and { \"enabled\": true }, then repeat the request.",
+  },
   "precondition-failed": {
     status: 412,
     title: "Somebody changed it in the meantime",

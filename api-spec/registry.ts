@@ -9,11 +9,24 @@ import { fanAdjustment } from "./calculations/fanAdjustment";
 import { reconciliation } from "./calculations/reconciliation";
 import { systemBalance } from "./calculations/systemBalance";
 import { traversePlan } from "./calculations/traversePlan";
+import * as instruments from "./records/instruments";
+import * as projects from "./records/projects";
+import * as traverses from "./records/traverses";
 
 /** Every operation of the public API, in the order the reference shows them. */
-export const OPERATIONS: OperationDefinition[] = [ductArea, traversePlan, airDensity, densityCorrection, averageVelocity, airflow, reconciliation, fanAdjustment, systemBalance, batch];
+export const OPERATIONS: OperationDefinition[] = [
+  ductArea, traversePlan, airDensity, densityCorrection, averageVelocity, airflow, reconciliation, fanAdjustment, systemBalance, batch,
+  projects.createProject, projects.listProjects, projects.readProject, projects.changeProject, projects.deleteProject,
+  instruments.createInstrument, instruments.listInstruments, instruments.readInstrument, instruments.changeInstrument, instruments.deleteInstrument,
+  instruments.createCalibration, instruments.listCalibrations, instruments.readCalibration,
+  traverses.createTraverse, traverses.listTraverses, traverses.readTraverse, traverses.changeTraverse, traverses.deleteTraverse,
+  traverses.issueTraverse, traverses.voidTraverse, traverses.reviseTraverse, traverses.readHistory, traverses.readSignature,
+];
 
 /** Groups of operations, with what the reference says of each. */
 export const TAGS: Record<string, string> = {
   Calculations: "Arithmetic of a duct traverse. Nothing is stored; the same request always gives the same answer.",
+  Projects: "Jobs that traverses belong to.",
+  Instruments: "The firm's instruments and their calibrations.",
+  Traverses: "Stored traverses: drafts that can be changed, and issued records that are signed and stay.",
 };

@@ -19,6 +19,9 @@ export const day = z.iso.date().describe("A date, e.g. 2026-11-30.");
 /** A line of text: trimmed, not empty. */
 export const line = (most: number) => z.string().trim().min(1).max(most);
 
+/** A shape of its own name, or null. (A `nullable()` one would lose its null behind the reference in the document.) */
+export const orNull = <Schema extends z.ZodType>(schema: Schema) => z.union([schema, z.null()]);
+
 /** Paging by keyset: as fast on the thousandth page as on the first. */
 export const pageQuery = {
   limit: z.coerce.number().int().min(1).max(LONGEST_PAGE).default(USUAL_PAGE).describe(`Items on a page, at most ${LONGEST_PAGE}.`),

@@ -2,7 +2,7 @@ import { z } from "zod";
 import { instrument as instrumentShape, probe } from "../calculations/shapes";
 import { defineOperation } from "../define";
 import { pressure, velocity } from "../quantities";
-import { calibrationId, day, instrumentId, line, moment, page, pageQuery, times } from "./common";
+import { calibrationId, day, instrumentId, line, moment, orNull, page, pageQuery, times } from "./common";
 
 const TAG = "Instruments";
 const { principle, assumedDensity, accuracy } = instrumentShape.shape;
@@ -23,7 +23,7 @@ export const instrumentFields = z
   .meta({ id: "InstrumentFields", description: "An instrument to be made." });
 export const instrumentChange = instrumentFields
   .partial()
-  .extend({ assumedDensity: assumedDensity.nullable(), accuracy: accuracy.nullable(), probe: probe.nullish() })
+  .extend({ assumedDensity: orNull(assumedDensity.unwrap()).optional(), accuracy: accuracy.nullable(), probe: orNull(probe).optional() })
   .meta({ id: "InstrumentChange", description: "What is to change of an instrument; null clears a field." });
 
 export const calibrationFields = z
@@ -33,7 +33,7 @@ export const calibrationFields = z
     laboratory: line(160).nullish(),
     certificateNumber: line(120).nullish(),
     gain: z.number().min(0.5).max(2).optional().describe("A reading counts as gain × reading + offset; 1 when left out."),
-    offset: z.union([pressure, velocity]).nullish().describe("In a unit of what the instrument reads; none when left out."),
+    offset: z.union([pressure, velocity, z.null()]).optional().describe("In a unit of what the instrument reads; none when left out."),
   })
   .refine(({ calibratedOn, dueOn }) => dueOn >= calibratedOn, { path: ["dueOn"], message: "The due date lies before the calibration.", params: { code: "due_before_calibration" } })
   .meta({ id: "CalibrationFields", description: "A calibration to be added." });
@@ -41,14 +41,14 @@ export const calibrationFields = z
 export const calibrationAnswer = z
   .strictObject({
     id: calibrationId, calibratedOn: day, dueOn: day, laboratory: z.string().nullable(), certificateNumber: z.string().nullable(),
-    gain: z.number(), offset: z.union([pressure, velocity]).nullable(), createdAt: moment,
+    gain: z.number(), offset: z.union([pressure, velocity, z.null()]), createdAt: moment,
   })
   .meta({ id: "Calibration", description: "A calibration of an instrument." });
 
 export const instrumentAnswer = z
   .strictObject({
     id: instrumentId, name: z.string(), manufacturer: z.string().nullable(), model: z.string().nullable(), serialNumber: z.string().nullable(),
-    principle, assumedDensity: assumedDensity.unwrap().nullable(), accuracy: accuracy.unwrap().nullable(), probe: probe.nullable(),
+    principle, assumedDensity: orNull(assumedDensity.unwrap()), accuracy: accuracy.unwrap().nullable(), probe: orNull(probe),
     notes: z.string().nullable(),
     calibrationDue: day.nullable().describe("Of the latest calibration; null where there is none."),
     ...times,

@@ -17,7 +17,9 @@ export async function up(knex: Knex): Promise<void> {
     // Written with the change; a worker makes a delivery for each endpoint and then marks it.
     moment(table, "dispatched_at").nullable();
     table.index(["organisation_id", "environment", "id"]);
+    table.index(["organisation_id", "environment", "type", "id"]);
     table.index(["dispatched_at", "id"]);
+    table.index(["at"]);
   });
 
   await knex.schema.createTable("webhook_endpoints", (table) => {
@@ -28,7 +30,9 @@ export async function up(knex: Knex): Promise<void> {
     table.string("description", 200).nullable();
     table.json("event_types").notNullable();
     table.text("secret_encrypted").notNullable();
-    table.integer("failures_in_a_row").unsigned().notNullable().defaultTo(0);
+    // After a rotation the secret before it signs as well, for a while.
+    table.text("previous_secret_encrypted").nullable();
+    moment(table, "previous_secret_until").nullable();
     moment(table, "failing_since").nullable();
     moment(table, "disabled_at").nullable();
     table.string("disabled_reason", 300).nullable();
@@ -48,19 +52,20 @@ export async function up(knex: Knex): Promise<void> {
     moment(table, "next_attempt_at").nullable();
     moment(table, "created_at").notNullable().defaultTo(knex.fn.now(3));
     moment(table, "delivered_at").nullable();
-    table.index(["status", "next_attempt_at"]);
+    // Which endpoints have something due, and what, without looking at what else waits for a slow one.
+    table.index(["status", "webhook_endpoint_id", "next_attempt_at"], "deliveries_due");
     table.index(["webhook_endpoint_id", "id"]);
     table.index(["event_id"]);
   });
 
   await knex.schema.createTable("delivery_attempts", (table) => {
-    identifier(table, "id").primary();
     identifier(table, "delivery_id").notNullable().references("deliveries.id").onDelete("CASCADE");
+    table.specificType("number", "SMALLINT UNSIGNED").notNullable();
+    table.primary(["delivery_id", "number"]);
     moment(table, "at").notNullable().defaultTo(knex.fn.now(3));
     table.specificType("status", "SMALLINT UNSIGNED").nullable();
     table.string("error", 300).nullable();
     table.integer("milliseconds").unsigned().notNullable();
-    table.index(["delivery_id", "id"]);
   });
 }
 

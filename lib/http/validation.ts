@@ -63,7 +63,9 @@ function unionFaults(issue: Extract<Issue, { code: "invalid_union" }>, root: unk
     return [value === undefined ? missing(at, `the field that says which kind it is${options}`) : fault(at, "invalid_value", `${shown(value)} is not a kind known here${options}.`)];
   }
   const alternatives = issue.errors.map((issues) => issues.flatMap((one) => faultsOf(one, root, path)));
-  const nearest = alternatives.filter((faults) => faults.length > 0).sort((one, other) => one.length - other.length)[0];
+  // What is of another type altogether, such as null, was not meant; of the others, the one with the fewest faults was.
+  const isOtherType = (faults: ProblemFault[]): number => Number(faults.some(({ pointer, code }) => code === "invalid_type" && pointer === pointerTo(path)));
+  const nearest = alternatives.filter((faults) => faults.length > 0).sort((one, other) => isOtherType(one) - isOtherType(other) || one.length - other.length)[0];
   return nearest ?? [fault(path, "invalid_value", issue.message)];
 }
 

@@ -1,0 +1,63 @@
+import type { Knex } from "knex";
+import { Problem } from "@/lib/problems/problem";
+
+/** A page of a list, and where the next one begins. */
+export interface Page<Item> {
+  items: Item[];
+  next: string | null;
+}
+
+export interface PageRequest {
+  limit: number;
+  after?: string | undefined;
+}
+
+/** What a list is ordered by: one column, and the id among equals. */
+interface Order {
+  column: string;
+  direction: "asc" | "desc";
+  /** The column's value of a row, as the cursor carries it. */
+  valueOf: (row: never) => string;
+  /** And back, for the query. */
+  parse?: (value: string) => unknown;
+}
+
+/**
+ * One page by keyset: the query goes on behind the last row seen, so that a deep page costs what the first does.
+ * @param query What is listed, with its filters.
+ * @param table Whose `id` breaks ties.
+ */
+export async function pageOf<Row extends { id: string }>(query: Knex.QueryBuilder<Row, Row[]>, table: string, { column, direction, valueOf, parse = (value) => value }: Order, { limit, after }: PageRequest): Promise<Page<Row>> {
+  const beyond = direction === "asc" ? ">" : "<";
+  if (after !== undefined) {
+    const [value, id] = cursorFrom(after);
+    const bound = parse(value);
+    if (bound instanceof Date && Number.isNaN(bound.getTime())) throw notACursor();
+    // The first comparison is all that the index needs; the second leaves out what was seen of the same value.
+    query.where(column, `${beyond}=`, bound as string).where((rest) => rest.where(column, beyond, bound as string).orWhere(`${table}.id`, beyond, id));
+  }
+  const rows = (await query.orderBy([{ column, order: direction }, { column: `${table}.id`, order: direction }]).limit(limit + 1)) as Row[];
+  const items = rows.slice(0, limit);
+  const last = items.at(-1);
+  return { items, next: rows.length > limit && last ? cursorOf(valueOf(last as never), last.id) : null };
+}
+
+const cursorOf = (value: string, id: string): string => Buffer.from(JSON.stringify([value, id])).toString("base64url");
+
+function cursorFrom(text: string): [string, string] {
+  try {
+    const parsed: unknown = JSON.parse(Buffer.from(text, "base64url").toString("utf8"));
+    if (Array.isArray(parsed) && parsed.length === 2 && parsed.every((part) => typeof part === "string")) return parsed as [string, string];
+  } catch {
+    // Falls through to the refusal: what is no cursor is told so, however it came to be.
+  }
+  throw notACursor();
+}
+
+function notACursor(): Problem {
+  const detail = "This is not the `next` of a page of this list.";
+  return new Problem("invalid-request", { detail, errors: [{ pointer: "", parameter: "after", code: "cursor_not_valid", detail }] });
+}
+
+/** Text as it may stand in a LIKE pattern. */
+export const containing = (text: string): string => `%${text.replace(/[\\%_]/g, "\\$&")}%`;

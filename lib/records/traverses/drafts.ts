@@ -1,0 +1,64 @@
+import type { z } from "zod";
+import type { traverseChange, traverseFields } from "@/api-spec/records/traverseShapes";
+import { newId } from "@/lib/ids/newId";
+import type { RecordContext } from "../context";
+import { addHistory } from "../history";
+import { noSuchReference } from "../noSuchRecord";
+import { projects } from "../projects";
+import { addRecord, recordsOf } from "../realm";
+import { datedInstrument, type DatedInstrument } from "./datedInstrument";
+import { measure } from "./measure";
+import { findDraft, findTraverse, traverses, type TraverseInput, type TraverseRow } from "./row";
+
+type Change = z.output<typeof traverseChange>;
+
+/** Stores a traverse as a draft. */
+export async function createTraverse(context: RecordContext, fields: z.output<typeof traverseFields>): Promise<TraverseRow> {
+  const id = newId("trv");
+  const now = new Date();
+  const columns = await columnsWith(context, null, fields);
+  await addRecord(context.db, "traverses", context.realm, { id, ...columns, taken_or_created_at: columns.taken_at ?? now, created_at: now, updated_at: now });
+  await addHistory(context, id, "created");
+  return findTraverse(context, id);
+}
+
+/** Changes the fields of a draft that are sent. @param requireMatch Throws unless the version is the one the caller saw. */
+export async function changeTraverse(context: RecordContext, id: string, change: Change, requireMatch: (version: number) => void): Promise<TraverseRow> {
+  const row = await findDraft(context, id);
+  requireMatch(row.version);
+  const columns = await columnsWith(context, row, change);
+  await traverses(context)
+    .where("traverses.id", id)
+    .update({ ...columns, taken_or_created_at: columns.taken_at ?? row.created_at, version: row.version + 1, updated_at: new Date() } as never);
+  await addHistory(context, id, "changed", { fields: Object.keys(change) });
+  return findTraverse(context, id);
+}
+
+/** Deletes a draft and all that belongs to it. */
+export async function deleteTraverse(context: RecordContext, id: string, requireMatch: (version: number) => void): Promise<void> {
+  const row = await findDraft(context, id);
+  requireMatch(row.version);
+  await recordsOf(context.db, "traverse_history", context.realm).where("traverse_id", id).delete();
+  await traverses(context).where("traverses.id", id).delete();
+}
+
+/** The columns of a draft as it was, with what is sent put in, and the result of it. */
+async function columnsWith(context: RecordContext, before: TraverseRow | null, change: Change) {
+  const { projectId = before?.project_id, instrumentId = before?.instrument_id ?? null, system = before?.system ?? null, takenAt, ...rest } = change;
+  if (projectId !== before?.project_id && !(await projects(context).where("projects.id", projectId!).first())) throw noSuchReference("/projectId", "project");
+  const taken = takenAt === undefined ? (before?.taken_at ?? null) : takenAt === null ? null : new Date(takenAt);
+  const input = withChange(before?.input ?? {}, rest);
+  const instrument = await datedInstrument(context, instrumentId, taken);
+  return { project_id: projectId, instrument_id: instrumentId, system, taken_at: taken, ...measuredColumns(input, instrument) };
+}
+
+/** What is kept of what was measured: as it was sent, with the instrument of its day, and what it comes to. */
+export function measuredColumns(input: TraverseInput, instrument: DatedInstrument | null) {
+  const { result, ...measured } = measure(input, instrument);
+  return { input: JSON.stringify(input), instrument_snapshot: instrument && JSON.stringify(instrument), result: result && JSON.stringify(result), ...measured };
+}
+
+function withChange(before: TraverseInput, change: Record<string, unknown>): TraverseInput {
+  const sent = Object.fromEntries(Object.entries(change).filter(([, value]) => value !== undefined));
+  return Object.fromEntries(Object.entries({ ...before, ...sent }).filter(([, value]) => value !== null)) as TraverseInput;
+}
