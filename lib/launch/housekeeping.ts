@@ -1,6 +1,7 @@
 import { database } from "@/db/connection";
 import { log } from "@/lib/runtime/log";
 import { onShutdown } from "@/lib/runtime/shutdown";
+import { calibrationDueEvents } from "@/lib/webhooks/calibrationDue";
 
 const HOUR_MS = 3_600_000;
 const DAY_MS = 24 * HOUR_MS;
@@ -12,6 +13,8 @@ const OUTDATED = [
   { table: "requests", column: "at", afterMs: 7 * DAY_MS },
   { table: "sessions", column: "expires_at", afterMs: 0 },
   { table: "email_tokens", column: "expires_at", afterMs: 7 * DAY_MS },
+  // With their deliveries.
+  { table: "events", column: "at", afterMs: 90 * DAY_MS },
 ] as const;
 
 /** Deletes what is outdated, once. Several instances may do so at the same time. */
@@ -22,8 +25,11 @@ export async function deleteOutdated(now: number): Promise<void> {
   }
 }
 
-/** Deletes what is outdated every hour, for as long as the process runs. */
+/** Deletes what is outdated and tells of calibrations that are due, every hour, for as long as the process runs. */
 export function startHousekeeping(): void {
-  const timer = setInterval(() => void deleteOutdated(Date.now()).catch((error: unknown) => log().warn({ err: error }, "outdated rows could not be deleted")), HOUR_MS).unref();
+  const timer = setInterval(() => {
+    void deleteOutdated(Date.now()).catch((error: unknown) => log().warn({ err: error }, "outdated rows could not be deleted"));
+    void calibrationDueEvents().catch((error: unknown) => log().warn({ err: error }, "calibrations that are due could not be told of"));
+  }, HOUR_MS).unref();
   onShutdown("housekeeping", async () => clearInterval(timer));
 }

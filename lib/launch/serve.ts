@@ -6,6 +6,7 @@ import { withCaller } from "@/lib/runtime/caller";
 import { config } from "@/lib/runtime/config";
 import { log } from "@/lib/runtime/log";
 import { runShutdownTasks } from "@/lib/runtime/shutdown";
+import { startWebhooks } from "@/lib/webhooks/worker";
 import { startHousekeeping } from "./housekeeping";
 import { mountCalculations } from "./mounted";
 
@@ -37,6 +38,7 @@ async function serve(): Promise<void> {
   log().info({ host: HOST, port: PORT, level: LOG_LEVEL }, "listening");
   stopOnRequest(server);
   startHousekeeping();
+  startWebhooks();
   process.send?.("ready");
 }
 

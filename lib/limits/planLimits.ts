@@ -1,7 +1,9 @@
 import { Problem } from "@/lib/problems/problem";
 import type { Key } from "@/lib/keys/keyDirectory";
+import { inBackground } from "@/lib/runtime/background";
 import { processWide } from "@/lib/runtime/processWide";
 import { onShutdown } from "@/lib/runtime/shutdown";
+import { recordQuotaReached } from "@/lib/webhooks/quotaReached";
 import { BlockLimiter, type Allowance, type Window } from "./blockLimiter";
 import { SharedCounter } from "./sharedCounter";
 
@@ -42,7 +44,10 @@ export async function spendRequest(key: Key, now: number): Promise<PlanAllowance
   if (!second.allowed) throw overLimit("burst-limit-reached", `The plan allows ${second.limit} requests a second.`, { burst: second, quota: null }, now);
   const fromMonth = quota.spend(subject, key.monthlyRequests, 1, now);
   const month = fromMonth instanceof Promise ? await fromMonth : fromMonth;
-  if (!month.allowed) throw overLimit("quota-reached", `The plan's ${month.limit} requests of this month are used up.`, { burst: second, quota: month }, now);
+  if (!month.allowed) {
+    inBackground("event of a quota reached", () => recordQuotaReached(key, now));
+    throw overLimit("quota-reached", `The plan's ${month.limit} requests of this month are used up.`, { burst: second, quota: month }, now);
+  }
   return { burst: second, quota: month };
 }
 

@@ -1,7 +1,7 @@
 import type { Knex } from "knex";
+import type { EventType } from "@/api-spec/records/events";
 import { newId } from "@/lib/ids/newId";
 import { addRecord, type Realm } from "@/lib/records/realm";
-import type { EventType } from "./eventTypes";
 
 /**
  * Writes what happened in the transaction of the change itself, so that neither is there without the other.
