@@ -53,6 +53,8 @@ export interface OperationDefinition<
   figure?: string;
   /** Reads and changes a record that has a version: the answer has an ETag, and a change takes If-Match. */
   versioned?: boolean;
+  /** Media type of the answer where it is not JSON. */
+  media?: "image/svg+xml" | "application/pdf" | "text/csv" | "application/x-ndjson";
   /** Largest accepted body; 1 MiB when left out. */
   maxBodyBytes?: number;
 }

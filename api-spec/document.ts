@@ -129,7 +129,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
           }),
         },
         ...(status !== "204" && {
-          content: {
+          content: definition.media ? { [definition.media]: { schema: { type: "string" as const } } } : {
             "application/json": { schema: definition.answer, ...(examples && { examples: examples.answer }) },
             ...(definition.figure && { "image/svg+xml": { schema: { type: "string" as const, description: definition.figure } } }),
           },

@@ -87,6 +87,12 @@ export const PROBLEMS = {
     meaning: "Something that a record has to have is missing. Everything that is missing is listed in errors, each with its place in the traverse.",
     remedy: "Change the draft until nothing is missing, then issue it again.",
   },
+  "nothing-to-draw": {
+    status: 409,
+    title: "There is nothing to draw yet",
+    meaning: "The traverse has no duct, or a duct but neither readings nor a layout.",
+    remedy: "Change the draft until it has a duct, and readings or a layout.",
+  },
   "not-issued": {
     status: 409,
     title: "Only an issued record can be voided or revised",

@@ -9,9 +9,12 @@ import { fanAdjustment } from "./calculations/fanAdjustment";
 import { reconciliation } from "./calculations/reconciliation";
 import { systemBalance } from "./calculations/systemBalance";
 import { traversePlan } from "./calculations/traversePlan";
+import * as events from "./records/events";
 import * as instruments from "./records/instruments";
 import * as projects from "./records/projects";
 import * as traverses from "./records/traverses";
+import { verify } from "./records/verify";
+import * as webhooks from "./records/webhookEndpoints";
 
 /** Every operation of the public API, in the order the reference shows them. */
 export const OPERATIONS: OperationDefinition[] = [
@@ -20,7 +23,10 @@ export const OPERATIONS: OperationDefinition[] = [
   instruments.createInstrument, instruments.listInstruments, instruments.readInstrument, instruments.changeInstrument, instruments.deleteInstrument,
   instruments.createCalibration, instruments.listCalibrations, instruments.readCalibration,
   traverses.createTraverse, traverses.listTraverses, traverses.readTraverse, traverses.changeTraverse, traverses.deleteTraverse,
-  traverses.issueTraverse, traverses.voidTraverse, traverses.reviseTraverse, traverses.readHistory, traverses.readSignature,
+  traverses.issueTraverse, traverses.voidTraverse, traverses.reviseTraverse, traverses.readHistory, traverses.readSignature, traverses.readFigure, traverses.readCertificate,
+  verify,
+  webhooks.createWebhookEndpoint, webhooks.listWebhookEndpoints, webhooks.readWebhookEndpoint, webhooks.changeWebhookEndpoint, webhooks.deleteWebhookEndpoint,
+  webhooks.rotateWebhookSecret, webhooks.listDeliveries, webhooks.redeliver, events.listEvents, events.readEvent,
 ];
 
 /** Groups of operations, with what the reference says of each. */
@@ -28,5 +34,7 @@ export const TAGS: Record<string, string> = {
   Calculations: "Arithmetic of a duct traverse. Nothing is stored; the same request always gives the same answer.",
   Projects: "Jobs that traverses belong to.",
   Instruments: "The firm's instruments and their calibrations.",
+  Verification: "For anyone who holds a record: no key is needed.",
   Traverses: "Stored traverses: drafts that can be changed, and issued records that are signed and stay.",
+  "Events and webhooks": "What happened to records, and endpoints that are told of it.",
 };

@@ -128,3 +128,22 @@ export const readSignature = defineOperation({
   }),
   problems: ["not-found", "not-issued"],
 });
+
+export const readFigure = defineOperation({
+  id: "readFigure", method: "get", path: "/traverses/{id}/figure.svg", tag: TAG, scope: "records:read", media: "image/svg+xml",
+  summary: "The figure of a traverse",
+  description: "The cross-section to scale, with each reading where it was taken, coloured by velocity, suspected slips ringed. A draft without readings gives the plan of its duct.",
+  params,
+  query: z.strictObject({ size: z.enum(["page", "thumbnail"]).default("page").describe("`thumbnail`: as small as a stamp, for lists.") }),
+  answer: z.string(),
+  problems: ["not-found", "nothing-to-draw"],
+});
+
+export const readCertificate = defineOperation({
+  id: "readCertificate", method: "get", path: "/traverses/{id}/certificate.pdf", tag: TAG, scope: "records:read", media: "application/pdf",
+  summary: "The certificate of a record",
+  description: "What was signed, as a PDF to file: duct, figure, conditions, instrument, readings, working, airflow with its uncertainty and verdict, checks, and a code that leads to the page where anyone can check it.",
+  params,
+  answer: z.string(),
+  problems: ["not-found", "not-issued"],
+});

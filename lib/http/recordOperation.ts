@@ -29,7 +29,8 @@ const MOST_TRIES = 4;
  */
 export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType, Query extends z.ZodType, Params extends z.ZodType>(
   definition: OperationDefinition<Body, Answer, Query, Params>,
-  run: (call: RecordCall<z.output<Body>, z.output<Query>, z.output<Params>>) => Promise<RecordResult<z.input<Answer>>>,
+  /** An operation whose answer is not JSON, such as a drawing, gives a Response. */
+  run: (call: RecordCall<z.output<Body>, z.output<Query>, z.output<Params>>) => Promise<RecordResult<z.input<Answer>> | Response>,
 ): Handler {
   return async (request, context) => {
     const passage = beginPassage();
@@ -39,9 +40,8 @@ export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType
       const { id: apiKeyId, organisationId, environment } = passage.key!;
       const realm = { organisationId, environment };
       const requireMatch = matcher(request);
-      const work = async (db: Knex): Promise<KeptAnswer> => kept(await run({ ...call, db, realm, by: { apiKeyId }, requireMatch }), definition);
-      const answer = definition.method === "get" ? await work(database()) : await once(request, realm, call.input, work);
-      const response = notModified(request, definition, answer) ?? new Response(answer.status === 204 ? null : answer.text, { status: answer.status, headers: answer.headers });
+      const runWith = (db: Knex) => run({ ...call, db, realm, by: { apiKeyId }, requireMatch });
+      const response = definition.method === "get" ? read(request, definition, await runWith(database())) : asResponse(await once(request, realm, call.input, async (db) => kept(await runWith(db), definition)));
       endPassage(definition, passage, response.status, null);
       return withHeaders(response, passage);
     } catch (error) {
@@ -51,6 +51,14 @@ export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType
       return withHeaders(response, passage);
     }
   };
+}
+
+const asResponse = ({ status, text, headers }: KeptAnswer): Response => new Response(status === 204 ? null : text, { status, headers });
+
+function read(request: Request, definition: OperationDefinition, result: RecordResult<unknown> | Response): Response {
+  if (result instanceof Response) return result;
+  const answer = kept(result, definition);
+  return notModified(request, answer) ?? asResponse(answer);
 }
 
 /** Does the work in a transaction, and, with an Idempotency-Key, does it a single time. */
@@ -91,7 +99,9 @@ function matcher(request: Request): (version: number) => void {
   };
 }
 
-function kept({ body, version, location }: RecordResult<unknown>, definition: OperationDefinition): KeptAnswer {
+function kept(result: RecordResult<unknown> | Response, definition: OperationDefinition): KeptAnswer {
+  if (result instanceof Response) throw new TypeError("a change is answered with JSON, so that its answer can be kept");
+  const { body, version, location } = result;
   return {
     status: definition.status ?? 200,
     headers: {
@@ -104,8 +114,8 @@ function kept({ body, version, location }: RecordResult<unknown>, definition: Op
   };
 }
 
-function notModified(request: Request, definition: OperationDefinition, answer: KeptAnswer): Response | null {
-  const seen = definition.method === "get" ? request.headers.get("if-none-match") : null;
+function notModified(request: Request, answer: KeptAnswer): Response | null {
+  const seen = request.headers.get("if-none-match");
   const etag = answer.headers["ETag"];
   if (seen === null || etag === undefined || !seen.split(",").some((tag) => tag.trim().replace(/^W\//, "") === etag)) return null;
   return new Response(null, { status: 304, headers: { ETag: etag, "Cache-Control": "private, no-cache" } });

@@ -58,7 +58,7 @@ function newerEngine({ input, instrument_snapshot, result, engine_version }: Tra
 export interface SummaryRow extends Pick<TraverseRow, "id" | "status" | "revision" | "project_id" | "instrument_id" | "system" | "taken_at" | "taken_or_created_at" | "percent_of_design" | "outside_tolerance" | "created_at" | "updated_at"> {
   location: string | null;
   technician: string | null;
-  airflow: string | null;
+  airflow: TraverseSummary["airflow"];
   verdict: "within" | "outside" | "undecided" | null;
 }
 
@@ -72,7 +72,7 @@ export const summaryOf = (row: SummaryRow): TraverseSummary => ({
   location: row.location,
   technician: row.technician,
   takenAt: row.taken_at?.toISOString() ?? null,
-  airflow: row.airflow === null ? null : (JSON.parse(row.airflow) as TraverseSummary["airflow"]),
+  airflow: row.airflow,
   percentOfDesign: row.percent_of_design,
   outsideTolerance: row.outside_tolerance === null ? null : row.outside_tolerance === 1,
   verdict: row.verdict,

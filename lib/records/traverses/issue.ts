@@ -5,12 +5,11 @@ import { signDetached } from "@/lib/signing/detachedJws";
 import { recordEvent } from "@/lib/webhooks/recordEvent";
 import type { RecordContext } from "../context";
 import { addHistory } from "../history";
-import type { IssuedDocument } from "../issuedDocument";
-import { findProject } from "../projects";
 import { addRecord } from "../realm";
-import { datedInstrument, snapshotOf, type DatedInstrument } from "./datedInstrument";
+import { datedInstrument } from "./datedInstrument";
+import { documentOf } from "./document";
 import { measuredColumns } from "./drafts";
-import { measure, measurementOf } from "./measure";
+import { measure } from "./measure";
 import { missingForIssue } from "./readiness";
 import { findDraft, findIssued, findTraverse, traverses, type TraverseRow } from "./row";
 
@@ -31,7 +30,7 @@ export async function issueTraverse(context: RecordContext, id: string, requireM
   const columns = measuredColumns(row.input, instrument);
   await traverses(context).where("traverses.id", id).update({ ...columns, status: "issued", issued_at: issuedAt, version: row.version + 1, updated_at: issuedAt } as never);
   const issued = await findTraverse(context, id);
-  const document = canonicalJson(await documentOf(context, issued, instrument));
+  const document = canonicalJson(await documentOf(context, issued));
   const { jws, keyId } = await signDetached(document, context.db);
   await context.db("issued_documents").insert({ traverse_id: id, document, signature: jws, signing_key_id: keyId, issued_at: issuedAt });
   await addHistory(context, id, "issued");
@@ -43,33 +42,6 @@ export async function issueTraverse(context: RecordContext, id: string, requireM
 function requireReady(missing: ReturnType<typeof missingForIssue>): void {
   if (missing.length === 0) return;
   throw new Problem("not-ready-to-issue", { detail: missing.map(({ detail }) => detail).join(" "), errors: missing });
-}
-
-async function documentOf(context: RecordContext, row: TraverseRow, instrument: DatedInstrument | null): Promise<IssuedDocument> {
-  const project = await findProject(context, row.project_id);
-  const { id, name } = (await context.db("organisations").where({ id: context.realm.organisationId }).first("id", "name")) as { id: string; name: string };
-  const { input } = row;
-  return {
-    format: "averduct/traverse/1",
-    id: row.id,
-    environment: context.realm.environment,
-    revision: row.revision,
-    supersedes: row.supersedes_id,
-    organisation: { id, name },
-    project: { id: project.id, name: project.name, number: project.number, location: project.location },
-    system: row.system,
-    location: input.location ?? null,
-    technician: input.technician!,
-    takenAt: row.taken_at!.toISOString(),
-    issuedAt: row.issued_at!.toISOString(),
-    notes: input.notes ?? null,
-    holes: { count: input.holes!.count, sealed: input.holes!.sealed, method: input.holes!.method ?? null },
-    instrument: instrument && snapshotOf(instrument),
-    calibrationWaiver: input.calibrationWaiver ?? null,
-    measurement: measurementOf(input, instrument)!,
-    result: row.result!,
-    engineVersion: row.engine_version!,
-  };
 }
 
 async function supersede(context: RecordContext, oldId: string, newId: string): Promise<void> {
