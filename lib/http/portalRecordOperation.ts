@@ -1,0 +1,29 @@
+import type { z } from "zod";
+import { ENVIRONMENT_COOKIE, environmentFrom } from "@/lib/records/environments";
+import type { RecordContext } from "@/lib/records/context";
+import { cookieOf } from "./cookies";
+import type { Handler } from "./operation";
+import { portalOperation, type Member } from "./portalOperation";
+import { inTransaction } from "./recordOperation";
+
+interface Definition<Body extends z.ZodType, Params extends z.ZodType> {
+  access: "viewer" | "developer" | "owner";
+  body?: Body;
+  params?: Params;
+  status?: 200 | 201 | 204;
+}
+
+/** A change to records by a person in the portal: in the environment they see, in one transaction, under their name. */
+export function portalRecordOperation<Body extends z.ZodType, Params extends z.ZodType>(
+  definition: Definition<Body, Params>,
+  run: (call: RecordContext & { caller: Member; input: z.output<Body>; params: z.output<Params> }) => Promise<unknown>,
+): Handler {
+  return (request, context) => {
+    const environment = environmentFrom(cookieOf(request, ENVIRONMENT_COOKIE));
+    const handler = portalOperation(definition, async ({ caller, input, params }) => {
+      const realm = { organisationId: caller.organisation.id, environment };
+      return { body: await inTransaction((db) => run({ db, realm, by: { userId: caller.userId }, caller, input, params })) };
+    });
+    return handler(request, context);
+  };
+}
