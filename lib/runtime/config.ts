@@ -15,6 +15,15 @@ const settings = z.object({
   /** SMTP server as a URL; left out, e-mails go to the local mailbox. */
   SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   MAIL_FROM: z.string().default("Averduct <no-reply@averduct.example>"),
+  /** Bucket for the files of records; left out, they are kept in OBJECTS_FOLDER. It belongs to one installation alone. */
+  S3_BUCKET: z.string().regex(/^[a-z0-9][a-z0-9.-]{1,61}[a-z0-9]$/, "must be the name of a bucket").optional(),
+  S3_REGION: z.string().default("us-east-1"),
+  /** Address of a service that speaks S3; left out, that of the region. */
+  S3_ENDPOINT: z.url({ protocol: /^https?$/ }).optional(),
+  /** Left out, the SDK looks where it usually does, such as the machine's role. */
+  S3_ACCESS_KEY_ID: z.string().optional(),
+  S3_SECRET_ACCESS_KEY: z.string().optional(),
+  OBJECTS_FOLDER: z.string().default(".data/objects"),
   /** How many proxies in front may be trusted to name the caller in X-Forwarded-For. */
   TRUSTED_PROXIES: z.coerce.number().int().min(0).max(5).default(0),
   LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "trace", "silent"]).default("info"),
