@@ -21,11 +21,25 @@ export interface VerifiedRecord {
   voided: { at: string; reason: string } | null;
 }
 
+interface SignedRow {
+  traverse_id: string;
+  document: string;
+  signature: string;
+  signing_key_id: string;
+}
+
+const signedRow = (id: string) => database()<SignedRow>("issued_documents").where("traverse_id", id).first();
+
+/** What was signed of a record, and its signature, as anyone may have them. Null where it was not issued. */
+export async function signedDocument(id: string): Promise<{ jws: string; document: string; keyId: string } | null> {
+  const row = await signedRow(id);
+  return row ? { jws: row.signature, document: row.document, keyId: row.signing_key_id } : null;
+}
+
 /** A record as anyone may see it, by its id alone: it has to have been issued. Null where it was not. */
 export async function verifyRecord(id: string): Promise<VerifiedRecord | null> {
-  const db = database();
-  const signed = await db<{ traverse_id: string; document: string; signature: string; signing_key_id: string }>("issued_documents").where("traverse_id", id).first();
-  const row = signed && (await db<TraverseRow>("traverses").where({ id }).first());
+  const signed = await signedRow(id);
+  const row = signed && (await database()<TraverseRow>("traverses").where({ id }).first());
   if (!signed || !row) return null;
   const document = parsed(signed.document);
   return {

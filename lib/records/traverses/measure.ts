@@ -51,7 +51,8 @@ export function measure(input: TraverseInput, instrument: DatedInstrument | null
 
 /** An instrument as the calculation takes it: its calibration's offset in the unit of the readings. */
 function asRead({ properties: { probe: _probe, ...properties }, calibration, gain, offset }: DatedInstrument, readings: Readings): Instrument {
-  if (!calibration) return properties;
+  // A calibration that found nothing to correct adds nothing to the working either.
+  if (!calibration || (gain === 1 && !offset)) return properties;
   return { ...properties, calibration: { gain, ...(offset && { offset: inUnitOf(readings, offset) }) } };
 }
 
