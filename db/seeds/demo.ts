@@ -5,6 +5,7 @@ import { knexConfig } from "@/knexfile";
 import { hashPassword } from "@/lib/accounts/password";
 import { newId } from "@/lib/ids/newId";
 import { makeKeyText, type Environment } from "@/lib/keys/keyText";
+import { seedRecords } from "./records";
 import { seedUsage } from "./usage";
 
 /** What the start command prints; kept in a file beside the data, because the database holds hashes only. */
@@ -88,6 +89,7 @@ async function seedAll(db: Knex): Promise<Demo> {
       await db("memberships").insert({ organisation_id: organisationId, user_id: person.id, role });
       if (account === ACCOUNTS[0]) signIns.push({ role, email, password: person.password });
     }
+    if (account === ACCOUNTS[0]) await seedRecords(db, { organisationId, environment: "sandbox" }, ownerId!);
     keyTexts.push(...(await seedKeys(db, organisationId, ownerId!, account)));
   }
   const administrator = await seedPerson(db, ADMINISTRATOR.name, ADMINISTRATOR.email, true);

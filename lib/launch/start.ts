@@ -41,6 +41,8 @@ export async function start({ development }: { development: boolean }): Promise<
     AVERDUCT_DIST_DIR: development ? ".next-dev" : ".next",
   };
   try {
+    // For what the seed does through the product's own functions, which read the configuration.
+    process.env.DATABASE_URL = databaseUrl;
     say("Bringing the database up to date …");
     await prepareDatabase(databaseUrl);
     const demo = given.AVERDUCT_MODE === "production" ? null : await seedDemo(databaseUrl, path.join(DATA_FOLDER, "demo.json"));
