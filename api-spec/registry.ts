@@ -9,6 +9,7 @@ import { fanAdjustment } from "./calculations/fanAdjustment";
 import { reconciliation } from "./calculations/reconciliation";
 import { systemBalance } from "./calculations/systemBalance";
 import { traversePlan } from "./calculations/traversePlan";
+import * as attachments from "./records/attachments";
 import * as events from "./records/events";
 import * as instruments from "./records/instruments";
 import * as projects from "./records/projects";
@@ -27,6 +28,8 @@ export const OPERATIONS: OperationDefinition[] = [
   verify,
   webhooks.createWebhookEndpoint, webhooks.listWebhookEndpoints, webhooks.readWebhookEndpoint, webhooks.changeWebhookEndpoint, webhooks.deleteWebhookEndpoint,
   webhooks.rotateWebhookSecret, webhooks.listDeliveries, webhooks.redeliver, events.listEvents, events.readEvent,
+  attachments.createAttachment, attachments.listAttachments, attachments.readAttachment, attachments.changeAttachment, attachments.deleteAttachment,
+  attachments.readAttachmentContent,
 ];
 
 /** Groups of operations, with what the reference says of each. */
@@ -37,4 +40,5 @@ export const TAGS: Record<string, string> = {
   Verification: "For anyone who holds a record: no key is needed.",
   Traverses: "Stored traverses: drafts that can be changed, and issued records that are signed and stay.",
   "Events and webhooks": "What happened to records, and endpoints that are told of it.",
+  Attachments: "Photographs and documents of a traverse: part of a draft, and kept with what was issued.",
 };
