@@ -11,6 +11,7 @@ const ROWS_AT_ONCE = 1_000;
 /** What is kept for a while only, and since when. */
 const OUTDATED = [
   { table: "requests", column: "at", afterMs: 7 * DAY_MS },
+  { table: "idempotency_keys", column: "created_at", afterMs: DAY_MS },
   { table: "sessions", column: "expires_at", afterMs: 0 },
   { table: "email_tokens", column: "expires_at", afterMs: 7 * DAY_MS },
   // With their deliveries.

@@ -35,9 +35,9 @@ export default async function VerifyPage({ params }: Props) {
   if (!record) notFound();
   const { document, state } = record;
   return (
-    <article className="mx-auto grid max-w-240 gap-6">
+    <article className="mx-auto grid max-w-240 grid-cols-[minmax(0,1fr)] gap-6">
       <PageHeader title="Record of a duct traverse">
-        {document ? `${document.organisation.name}, revision ${document.revision}` : "What was signed cannot be read any more."}
+        {document ? `${document.organisation.name}, revision ${document.revision}.` : "What was signed cannot be read any more."}
         {document?.environment === "sandbox" && " Made in a sandbox: a trial, not a measurement to rely on."}
       </PageHeader>
       <Outcome state={state} />
