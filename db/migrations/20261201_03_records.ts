@@ -80,6 +80,8 @@ export async function up(knex: Knex): Promise<void> {
     // What was measured and what is known of it, as it was sent; what the engine made of it, working included.
     table.json("input").notNullable();
     table.json("result").nullable();
+    // What lists show of both, so that they need not read the whole.
+    table.json("summary").notNullable();
     // The instrument and its calibration as they were on the day, with what the calculation takes of them.
     table.json("instrument_snapshot").nullable();
     textColumn(table, "engine_version", 20).nullable();
@@ -169,7 +171,7 @@ const IMMUTABLE = [
      NEW.id = OLD.id AND NEW.organisation_id = OLD.organisation_id AND NEW.environment = OLD.environment
      AND NEW.revision = OLD.revision AND NEW.project_id = OLD.project_id AND NEW.instrument_id <=> OLD.instrument_id
      AND NEW.supersedes_id <=> OLD.supersedes_id AND NEW.system <=> OLD.system AND NEW.taken_at <=> OLD.taken_at
-     AND NEW.taken_or_created_at = OLD.taken_or_created_at AND NEW.input = OLD.input AND NEW.result <=> OLD.result AND NEW.instrument_snapshot <=> OLD.instrument_snapshot
+     AND NEW.taken_or_created_at = OLD.taken_or_created_at AND NEW.input = OLD.input AND NEW.result <=> OLD.result AND NEW.summary = OLD.summary AND NEW.instrument_snapshot <=> OLD.instrument_snapshot
      AND NEW.engine_version <=> OLD.engine_version AND NEW.percent_of_design <=> OLD.percent_of_design
      AND NEW.outside_tolerance <=> OLD.outside_tolerance AND NEW.issued_at <=> OLD.issued_at AND NEW.created_at = OLD.created_at
      AND (NEW.status = OLD.status OR (OLD.status = 'issued' AND NEW.status IN ('superseded', 'void')) OR (OLD.status = 'superseded' AND NEW.status = 'void'))

@@ -9,6 +9,7 @@ import { ensureDebianProgram, MARIADB } from "@/lib/launch/debian";
 import { ROOT } from "@/lib/launch/packages.mjs";
 import { makeKey, makeOrganisation, testDatabase } from "../support/accounts";
 import { benchBatch } from "./batch";
+import { benchLists } from "./lists";
 import { benchEngine } from "./engine";
 import { measure, requestsPerSecond, summary, type Round, type Target } from "./load";
 
@@ -66,6 +67,7 @@ export async function main(): Promise<void> {
     row("the same on a second instance, one database", summary(rounds, "second", "bare"));
     benchEngine(BODY);
     await benchBatch(`http://127.0.0.1:${PORTS.one}/api/v1/calculations/batch`, text, BODY, one.child.pid!);
+    await benchLists(`http://127.0.0.1:${PORTS.one}`, organisationId);
     await bothAtOnce(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
   } finally {
     bare.kill("SIGTERM");

@@ -54,12 +54,12 @@ function newerEngine({ input, instrument_snapshot, result, engine_version }: Tra
   return now && now.value !== result.airflow.actual.value ? { version: ENGINE_VERSION, airflow: now } : null;
 }
 
+/** What lists show of what was measured and of the result, kept beside the whole of them. */
+export type Summary = Pick<TraverseSummary, "location" | "technician" | "airflow" | "verdict">;
+
 /** A row of a list: only what lists show is read of it. */
 export interface SummaryRow extends Pick<TraverseRow, "id" | "status" | "revision" | "project_id" | "instrument_id" | "system" | "taken_at" | "taken_or_created_at" | "percent_of_design" | "outside_tolerance" | "created_at" | "updated_at"> {
-  location: string | null;
-  technician: string | null;
-  airflow: TraverseSummary["airflow"];
-  verdict: "within" | "outside" | "undecided" | null;
+  summary: Summary;
 }
 
 export const summaryOf = (row: SummaryRow): TraverseSummary => ({
@@ -69,13 +69,13 @@ export const summaryOf = (row: SummaryRow): TraverseSummary => ({
   projectId: row.project_id,
   instrumentId: row.instrument_id,
   system: row.system,
-  location: row.location,
-  technician: row.technician,
+  location: row.summary.location,
+  technician: row.summary.technician,
   takenAt: row.taken_at?.toISOString() ?? null,
-  airflow: row.airflow,
+  airflow: row.summary.airflow,
   percentOfDesign: row.percent_of_design,
   outsideTolerance: row.outside_tolerance === null ? null : row.outside_tolerance === 1,
-  verdict: row.verdict,
+  verdict: row.summary.verdict,
   createdAt: row.created_at.toISOString(),
   updatedAt: row.updated_at.toISOString(),
 });

@@ -8,6 +8,7 @@ import { projects } from "../projects";
 import { addRecord, recordsOf } from "../realm";
 import { datedInstrument, type DatedInstrument } from "./datedInstrument";
 import { measure } from "./measure";
+import type { Summary } from "./answer";
 import { findDraft, findTraverse, traverses, type TraverseInput, type TraverseRow } from "./row";
 
 type Change = z.output<typeof traverseChange>;
@@ -55,7 +56,8 @@ async function columnsWith(context: RecordContext, before: TraverseRow | null, c
 /** What is kept of what was measured: as it was sent, with the instrument of its day, and what it comes to. */
 export function measuredColumns(input: TraverseInput, instrument: DatedInstrument | null) {
   const { result, ...measured } = measure(input, instrument);
-  return { input: JSON.stringify(input), instrument_snapshot: instrument && JSON.stringify(instrument), result: result && JSON.stringify(result), ...measured };
+  const summary: Summary = { location: input.location ?? null, technician: input.technician ?? null, airflow: result?.airflow.actual ?? null, verdict: result?.design?.verdict ?? null };
+  return { input: JSON.stringify(input), summary: JSON.stringify(summary), instrument_snapshot: instrument && JSON.stringify(instrument), result: result && JSON.stringify(result), ...measured };
 }
 
 function withChange(before: TraverseInput, change: Record<string, unknown>): TraverseInput {

@@ -24,13 +24,8 @@ export function filteredTraverses(context: Reading, { projectId, status, system,
 
 /** A page of traverses. */
 export async function listTraverses(context: Reading, { limit, after, sort, ...filters }: z.output<typeof traversesQuery>): Promise<Page<TraverseSummary>> {
-  const { db } = context;
   const query = filteredTraverses(context, filters).select<SummaryRow[]>(
-    "id", "status", "revision", "project_id", "instrument_id", "system", "taken_at", "taken_or_created_at", "percent_of_design", "outside_tolerance", "created_at", "updated_at",
-    db.raw("JSON_VALUE(input, '$.location') AS location"),
-    db.raw("JSON_VALUE(input, '$.technician') AS technician"),
-    db.raw("JSON_EXTRACT(result, '$.airflow.actual') AS airflow"),
-    db.raw("JSON_VALUE(result, '$.design.verdict') AS verdict"),
+    "id", "status", "revision", "project_id", "instrument_id", "system", "taken_at", "taken_or_created_at", "percent_of_design", "outside_tolerance", "created_at", "updated_at", "summary",
   ) as unknown as Knex.QueryBuilder<SummaryRow, SummaryRow[]>;
   const direction = sort.startsWith("-") ? "desc" : "asc";
   const order = sort.endsWith("taken")
