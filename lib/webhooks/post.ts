@@ -4,7 +4,7 @@ import type { IncomingMessage } from "node:http";
 import type { LookupFunction } from "node:net";
 import { checkTarget, publicLookup, type TargetPolicy } from "./targets";
 
-export const TIMEOUT_MS = 10_000;
+const TIMEOUT_MS = 10_000;
 /** Of an answer's body nothing is used; this much is read, so that a receiver can finish what it says. */
 const MOST_BODY_BYTES = 4_096;
 const MOST_ERROR_CHARACTERS = 300;
@@ -17,7 +17,7 @@ export interface Outcome {
   milliseconds: number;
 }
 
-interface Message {
+export interface Message {
   url: string;
   headers: Record<string, string>;
   body: string;

@@ -65,14 +65,15 @@ export interface DueEndpoint {
  * @param most How many at the most.
  */
 export async function dueEndpoints(db: Knex, except: string[], most: number): Promise<DueEndpoint[]> {
-  const due = db("deliveries").where("status", "pending").groupBy("webhook_endpoint_id").select("webhook_endpoint_id").min({ due_at: "next_attempt_at" }).as("due");
-  const rows = await db(due)
-    .join("webhook_endpoints as e", "e.id", "due.webhook_endpoint_id")
-    .where("due.due_at", "<=", db.fn.now(3))
+  // For each endpoint one look at the head of its queue, however long that is.
+  const due = db("deliveries as d").where("d.status", "pending").whereRaw("d.webhook_endpoint_id = e.id").orderBy("d.next_attempt_at").limit(1).select("d.next_attempt_at").as("due_at");
+  const rows = await db("webhook_endpoints as e")
+    .whereNull("e.disabled_at")
     .whereNotIn("e.id", except)
-    .orderBy("due.due_at")
+    .having("due_at", "<=", db.fn.now(3))
+    .orderBy("due_at")
     .limit(most)
-    .select<{ id: string; failing_since: Date | null }[]>("e.id", "e.failing_since");
+    .select<{ id: string; failing_since: Date | null }[]>("e.id", "e.failing_since", due);
   return rows.map(({ id, failing_since }) => ({ id, failing: failing_since !== null }));
 }
 

@@ -4,7 +4,7 @@ import { log } from "@/lib/runtime/log";
 import { open } from "@/lib/runtime/secretBox";
 import { onShutdown } from "@/lib/runtime/shutdown";
 import { tellOwners } from "./disableEndpoint";
-import { post } from "./post";
+import { post, type Message } from "./post";
 import { dispatchEvents, dueEndpoints, takeDeliveries, type DueEndpoint, type TakenDelivery } from "./queue";
 import { settle } from "./settle";
 import { signatureHeaders } from "./signature";
@@ -88,18 +88,25 @@ export class WebhookWorker {
   }
 
   async #deliver(delivery: TakenDelivery): Promise<void> {
-    const outcome = await post(signed(delivery), this.policy);
+    const message = signed(delivery);
+    const outcome = message === null ? { status: null, error: "The endpoint's secret could not be read.", milliseconds: 0 } : await post(message, this.policy);
     const reason = await this.db.transaction((transaction) => settle(transaction, delivery, outcome), { isolationLevel: "read committed" });
     if (reason !== null) await tellOwners(this.db, delivery.realm, { url: delivery.url, reason }).catch((error: unknown) => log().error({ err: error }, "owners could not be told of a disabled endpoint"));
   }
 }
 
-/** A delivery's message, signed for this attempt with the secrets in force. */
-function signed({ url, event, secretEncrypted, previousSecretEncrypted, previousSecretUntil }: TakenDelivery): { url: string; headers: Record<string, string>; body: string } {
+/** A delivery's message, signed for this attempt with the secrets in force; null where those were sealed under another installation's secret. */
+function signed({ url, event, secretEncrypted, previousSecretEncrypted, previousSecretUntil }: TakenDelivery): Message | null {
   const now = Date.now();
   const body = JSON.stringify({ type: event.type, timestamp: event.at.toISOString(), data: event.data });
   const previous = previousSecretEncrypted !== null && previousSecretUntil !== null && previousSecretUntil.getTime() > now ? [previousSecretEncrypted] : [];
-  return { url, body, headers: signatureHeaders([secretEncrypted, ...previous].map(open), event.id, Math.floor(now / 1_000), body) };
+  try {
+    const secrets = [secretEncrypted, ...previous].map(open);
+    return { url, body, headers: signatureHeaders(secrets, event.id, Math.floor(now / 1_000), body) };
+  } catch (error) {
+    log().error({ err: error }, "the secret of a webhook endpoint could not be read");
+    return null;
+  }
 }
 
 /** Starts this process's worker; it stops with the process. */

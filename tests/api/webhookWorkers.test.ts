@@ -108,9 +108,14 @@ describe("workers on one database", () => {
     expect(after).toMatchObject({ status: "pending", nextAttemptAt: second!.nextAttemptAt });
   });
 
-  it("find what is due by the index alone", async () => {
-    const [plan] = (await testDatabase().raw("EXPLAIN SELECT webhook_endpoint_id, MIN(next_attempt_at) FROM deliveries WHERE status = 'pending' GROUP BY webhook_endpoint_id"))[0];
-    expect(plan).toMatchObject({ key: "deliveries_due", Extra: expect.stringContaining("Using index") });
+  it("count a secret that cannot be read as a failed attempt", async () => {
+    const us = await partner();
+    const { id } = await makeEndpoint(us, receiver.url("/unreadable"));
+    await testDatabase()("webhook_endpoints").where({ id }).update({ secret_encrypted: "c2VhbGVkIHVuZGVyIGFub3RoZXIgc2VjcmV0IHRoYW4gdGhpcw" });
+    await happen(us);
+    const [one] = await deliveriesWhen(us, id, ([first]) => first?.attempts.length === 1);
+    expect(one).toMatchObject({ status: "pending", attempts: [{ status: null, error: "The endpoint's secret could not be read." }] });
+    expect(receiver.received).toEqual([]);
   });
 });
 
