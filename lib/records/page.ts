@@ -28,15 +28,18 @@ interface Order {
  * @param table Whose `id` breaks ties.
  */
 export async function pageOf<Row extends { id: string }>(query: Knex.QueryBuilder<Row, Row[]>, table: string, { column, direction, valueOf, parse = (value) => value }: Order, { limit, after }: PageRequest): Promise<Page<Row>> {
+  const idColumn = `${table}.id`;
   const beyond = direction === "asc" ? ">" : "<";
   if (after !== undefined) {
     const [value, id] = cursorFrom(after);
     const bound = parse(value);
     if (bound instanceof Date && Number.isNaN(bound.getTime())) throw notACursor();
-    // The first comparison is all that the index needs; the second leaves out what was seen of the same value.
-    query.where(column, `${beyond}=`, bound as string).where((rest) => rest.where(column, beyond, bound as string).orWhere(`${table}.id`, beyond, id));
+    // Written out, because the database makes no range of an index out of (column, id) < (?, ?).
+    if (column === idColumn) query.where(idColumn, beyond, id);
+    else query.where((rest) => rest.where(column, beyond, bound as string).orWhere((same) => same.where(column, bound as string).where(idColumn, beyond, id)));
   }
-  const rows = (await query.orderBy([{ column, order: direction }, { column: `${table}.id`, order: direction }]).limit(limit + 1)) as Row[];
+  const order = [...new Set([column, idColumn])].map((name) => ({ column: name, order: direction }));
+  const rows = (await query.orderBy(order).limit(limit + 1)) as Row[];
   const items = rows.slice(0, limit);
   const last = items.at(-1);
   return { items, next: rows.length > limit && last ? cursorOf(valueOf(last as never), last.id) : null };

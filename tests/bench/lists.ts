@@ -16,14 +16,14 @@ export async function benchLists(base: string, organisationId: string): Promise<
     "first page by when taken": "sort=-taken",
     "deep page": `after=${cursor(idOf(rows / 2), idOf(rows / 2))}`,
     "deep page by when taken": `sort=-taken&after=${cursor(takenAt(rows / 2), idOf(rows / 2))}`,
-    project: `projectId=${references.projects[3]}`,
-    "project, by when taken": `projectId=${references.projects[3]}&sort=taken`,
+    project: `projectId=${references.projects[1]}`,
+    "project, by when taken": `projectId=${references.projects[1]}&sort=taken`,
     status: "status=issued",
     system: "system=AHU-7",
     instrument: `instrumentId=${references.instruments[2]}&sort=-taken`,
     "taken between": `takenFrom=${takenAt(rows * 0.7)}&takenBefore=${takenAt(rows * 0.2)}&sort=taken`,
     "outside tolerance": "outsideTolerance=true&sort=-taken",
-    "status and project": `status=issued&projectId=${references.projects[3]}`,
+    "status and project": `status=issued&projectId=${references.projects[1]}`,
   });
   await store(organisationId, references, 1, FEW);
   const before = await timed(base, text, asked(FEW));
@@ -75,7 +75,7 @@ async function store(organisationId: string, { projects, instruments }: Referenc
   await testDatabase().raw(
     `INSERT INTO traverses (id, organisation_id, environment, status, project_id, instrument_id, system, taken_at, taken_or_created_at, input, result, summary, percent_of_design, outside_tolerance)
      SELECT CONCAT('trv_', LPAD(seq, 26, '0')), ?, 'sandbox', ELT(1 + seq % 4, 'draft', 'issued', 'issued', 'superseded'), ${nth(projects)}, ${nth(instruments)}, CONCAT('AHU-', seq % 12),
-       TIMESTAMPADD(MINUTE, -10 * seq, '2026-11-01'), TIMESTAMPADD(MINUTE, -10 * seq, '2026-11-01'), CONCAT('{"notes":"', REPEAT('reading ', 80), '"}'), CONCAT('{"notes":"', REPEAT('working ', 250), '"}'),
+       TIMESTAMP '2026-11-01 00:00:00' - INTERVAL 10 * seq MINUTE, TIMESTAMP '2026-11-01 00:00:00' - INTERVAL 10 * seq MINUTE, CONCAT('{"notes":"', REPEAT('reading ', 80), '"}'), CONCAT('{"notes":"', REPEAT('working ', 250), '"}'),
        '{"location":"Supply main","technician":"R. Okonjo-Lindqvist","airflow":{"value":2531.4,"unit":"ft3/min"},"verdict":"within"}', 80 + seq % 40, IF(seq % 10 = 0, 1, 0)
      FROM seq_${from}_to_${to}`,
     [organisationId],

@@ -42,8 +42,12 @@ async function startBare(): Promise<ChildProcess> {
   return child;
 }
 
-/** Measures everything in one run and prints ratios; absolute figures belong to this machine at this moment. */
-export async function main(): Promise<void> {
+/**
+ * Measures in one run and prints ratios; absolute figures belong to this machine at this moment.
+ * @param only A part by itself: `http`, `engine`, `batch` or `lists`; everything when left out.
+ */
+export async function main([only]: string[]): Promise<void> {
+  const wanted = (part: string): boolean => only === undefined || only === part;
   ensureDebianProgram(MARIADB);
   await stopLeftover(FOLDER);
   rmSync(FOLDER, { recursive: true, force: true });
@@ -60,21 +64,26 @@ export async function main(): Promise<void> {
     const { text } = await makeKey({ organisationId });
     const airflow = (port: number): Target => ({ url: `http://127.0.0.1:${port}/api/v1/calculations/airflow`, headers: { authorization: `Bearer ${text}` }, body: BODY });
     const bareTarget: Target = { url: `http://127.0.0.1:${PORTS.bare}/echo`, body: BODY };
-    const rounds = await measure({ bare: bareTarget, airflow: airflow(PORTS.one), second: airflow(PORTS.two) });
-    console.log("\nHTTP, one instance, 16 connections, 25 readings a request; medians of 9 rounds in turns");
-    row("bare Next.js route handler: parse and echo", summary(rounds, "bare", "bare"));
-    row("airflow: key, limits, validation, engine, usage", summary(rounds, "airflow", "bare"));
-    row("the same on a second instance, one database", summary(rounds, "second", "bare"));
-    benchEngine(BODY);
-    await benchBatch(`http://127.0.0.1:${PORTS.one}/api/v1/calculations/batch`, text, BODY, one.child.pid!);
-    await benchLists(`http://127.0.0.1:${PORTS.one}`, organisationId);
-    await bothAtOnce(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
+    const base = `http://127.0.0.1:${PORTS.one}`;
+    if (wanted("http")) await inTurns(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
+    if (wanted("engine")) benchEngine(BODY);
+    if (wanted("batch")) await benchBatch(`${base}/api/v1/calculations/batch`, text, BODY, one.child.pid!);
+    if (wanted("lists")) await benchLists(base, organisationId);
+    if (wanted("http")) await bothAtOnce(bareTarget, airflow(PORTS.one), airflow(PORTS.two));
   } finally {
     bare.kill("SIGTERM");
     await Promise.all([one.stop(), two.stop()]);
     await testDatabase().destroy();
     await database.stop();
   }
+}
+
+async function inTurns(bare: Target, airflow: Target, second: Target): Promise<void> {
+  const rounds = await measure({ bare, airflow, second });
+  console.log("\nHTTP, one instance, 16 connections, 25 readings a request; medians of 9 rounds in turns");
+  row("bare Next.js route handler: parse and echo", summary(rounds, "bare", "bare"));
+  row("airflow: key, limits, validation, engine, usage", summary(rounds, "airflow", "bare"));
+  row("the same on a second instance, one database", summary(rounds, "second", "bare"));
 }
 
 /** Two instances loaded at the same time share this machine's cores, so the bare handler is loaded twice as well. */
