@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from "vitest";
 import { newId } from "@/lib/ids/newId";
 import { calibrationDueEvents } from "@/lib/webhooks/calibrationDue";
-import { takeDeliveries } from "@/lib/webhooks/queue";
+import { dispatchEvents, takeDeliveries } from "@/lib/webhooks/queue";
+import { recordEvent } from "@/lib/webhooks/recordEvent";
 import { settle } from "@/lib/webhooks/settle";
 import { WebhookWorker } from "@/lib/webhooks/worker";
 import { testDatabase } from "../support/accounts";
@@ -36,8 +37,11 @@ describe("workers on one database", () => {
     // Beside the application's own.
     const workers = [new WebhookWorker(testDatabase(), "any"), new WebhookWorker(testDatabase(), "any")];
     try {
-      const events: string[] = [];
-      for (let index = 0; index < 100; index += 1) events.push(await happen(us));
+      // All seen at once, by all workers.
+      await testDatabase().transaction(async (db) => {
+        for (let index = 0; index < 100; index += 1) await recordEvent(db, us.realm, "traverse.issued", { id: index });
+      });
+      const events: string[] = await testDatabase()("events").where({ organisation_id: us.realm.organisationId }).pluck("id");
       await until("all deliveries", async () => {
         const [row] = await testDatabase()("deliveries").where({ organisation_id: us.realm.organisationId, status: "delivered" }).count({ count: "*" });
         return Number(row!["count"]) === 300;
@@ -50,6 +54,20 @@ describe("workers on one database", () => {
     } finally {
       await Promise.all(workers.map((worker) => worker.stop()));
     }
+  });
+
+  it("make one delivery of an event that several find at the same time", async () => {
+    const us = await partner();
+    await makeEndpoint(us, receiver.url("/once"));
+    for (let round = 0; round < 10; round += 1) {
+      await testDatabase().transaction(async (db) => {
+        for (let index = 0; index < 20; index += 1) await recordEvent(db, us.realm, "traverse.issued", { id: index });
+      });
+      await Promise.all([1, 2, 3].map(() => dispatchEvents(testDatabase())));
+    }
+    const count = async (status: string) => Number((await testDatabase()("deliveries").where({ organisation_id: us.realm.organisationId, status }).count({ count: "*" }))[0]!["count"]);
+    await until("all to be made and delivered", async () => (await count("delivered")) >= 200 && (await count("pending")) === 0);
+    expect(await count("delivered")).toBe(200);
   });
 
   it("settle what is under way before they stop", async () => {
