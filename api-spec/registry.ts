@@ -14,6 +14,7 @@ import * as events from "./records/events";
 import * as instruments from "./records/instruments";
 import * as projects from "./records/projects";
 import * as traverses from "./records/traverses";
+import { readUsage } from "./records/usage";
 import { verify } from "./records/verify";
 import * as webhooks from "./records/webhookEndpoints";
 
@@ -30,6 +31,7 @@ export const OPERATIONS: OperationDefinition[] = [
   webhooks.rotateWebhookSecret, webhooks.listDeliveries, webhooks.redeliver, events.listEvents, events.readEvent,
   attachments.createAttachment, attachments.listAttachments, attachments.readAttachment, attachments.changeAttachment, attachments.deleteAttachment,
   attachments.readAttachmentContent,
+  readUsage,
 ];
 
 /** Groups of operations, with what the reference says of each. */
@@ -37,8 +39,9 @@ export const TAGS: Record<string, string> = {
   Calculations: "Arithmetic of a duct traverse. Nothing is stored; the same request always gives the same answer.",
   Projects: "Jobs that traverses belong to.",
   Instruments: "The firm's instruments and their calibrations.",
-  Verification: "For anyone who holds a record: no key is needed.",
   Traverses: "Stored traverses: drafts that can be changed, and issued records that are signed and stay.",
-  "Events and webhooks": "What happened to records, and endpoints that are told of it.",
   Attachments: "Photographs and documents of a traverse: part of a draft, and kept with what was issued.",
+  Verification: "For anyone who holds a record: no key is needed.",
+  "Events and webhooks": "What happened to records, and endpoints that are told of it.",
+  Usage: "What the organisation's keys were used for.",
 };

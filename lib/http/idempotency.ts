@@ -2,6 +2,7 @@ import { createHash } from "node:crypto";
 import type { Knex } from "knex";
 import { addRecord, recordsOf, type Realm } from "@/lib/records/realm";
 import { Problem } from "@/lib/problems/problem";
+import { open, seal } from "@/lib/runtime/secretBox";
 
 const LONGEST = 200;
 
@@ -38,12 +39,12 @@ export async function claimIdempotencyKey(db: Knex, realm: Realm, key: string, f
   }
   const kept = await recordsOf<{ fingerprint: Buffer; status: number; headers: Record<string, string>; answer: string }>(db, "idempotency_keys", realm).where("idempotency_key", key).first();
   if (!kept) throw new Error("an idempotency key that was there is gone");
-  if (kept.fingerprint.equals(fingerprint)) return { status: kept.status, headers: { ...kept.headers, "Idempotency-Replayed": "true" }, text: kept.answer };
+  if (kept.fingerprint.equals(fingerprint)) return { status: kept.status, headers: { ...kept.headers, "Idempotency-Replayed": "true" }, text: open(kept.answer) };
   const detail = "This Idempotency-Key was used for another request within the last 24 hours.";
   throw new Problem("idempotency-key-reused", { detail, errors: [{ pointer: "", header: "Idempotency-Key", code: "idempotency_key_reused", detail }] });
 }
 
-/** Keeps the answer with the work it belongs to, so that either both are there or neither. */
+/** Keeps the answer with the work it belongs to, so that either both are there or neither. Sealed: an answer may hold a secret that is shown once. */
 export async function keepAnswer(db: Knex, realm: Realm, key: string, { status, headers, text }: KeptAnswer): Promise<void> {
-  await recordsOf(db, "idempotency_keys", realm).where("idempotency_key", key).update({ status, headers: JSON.stringify(headers), answer: text });
+  await recordsOf(db, "idempotency_keys", realm).where("idempotency_key", key).update({ status, headers: JSON.stringify(headers), answer: seal(text) });
 }

@@ -35,3 +35,21 @@ describe("usage", () => {
     expect(row).toMatchObject({ id: headers["request-id"], problem: "invalid-request", status: 422 });
   });
 });
+
+describe("usage through the API", () => {
+  it("gives the organisation's own, by day, key and operation", async () => {
+    const { text, organisationId, id } = await makeKey({ scopes: ["calculations", "usage:read"] });
+    for (let call = 0; call < 3; call += 1) await calculate("airflow", text, ROUND_TRAVERSE).expect(200);
+    await calculate("airflow", text, {}).expect(422);
+    await new Promise((resolve) => setTimeout(resolve, 800));
+    const today = new Date().toISOString().slice(0, 10);
+    const { body } = await api().get(`/api/v1/usage?from=${today}&to=${today}`).set("Authorization", `Bearer ${text}`).expect(200);
+    expect(body.items.find(({ operation }: { operation: string }) => operation === "airflow")).toMatchObject({ day: today, keyId: id, environment: "sandbox", requests: 4, refused: 1, items: 4 });
+    const other = await makeKey({ organisationId: (await makeKey()).organisationId, scopes: ["usage:read"] });
+    const theirs = await api().get(`/api/v1/usage?from=${today}&to=${today}`).set("Authorization", `Bearer ${other.text}`).expect(200);
+    expect(JSON.stringify(theirs.body)).not.toContain(id);
+    expect(organisationId).not.toBe(other.organisationId);
+    const { body: refused } = await api().get(`/api/v1/usage?from=${today}&to=2020-01-01`).set("Authorization", `Bearer ${text}`).expect(422);
+    expect(refused.errors[0]).toMatchObject({ parameter: "to", code: "days_reversed" });
+  });
+});
