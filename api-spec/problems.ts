@@ -93,6 +93,12 @@ export const PROBLEMS = {
     meaning: "The traverse has no duct, or a duct but neither readings nor a layout.",
     remedy: "Change the draft until it has a duct, and readings or a layout.",
   },
+  "record-altered": {
+    status: 409,
+    title: "The stored record is not what was signed",
+    meaning: "Somebody changed the record behind the product's back; its signature no longer covers what is stored.",
+    remedy: "Do not rely on the record. Report it with the request id; a certificate that you hold can still be checked against the published keys.",
+  },
   "not-issued": {
     status: 409,
     title: "Only an issued record can be voided or revised",

@@ -145,5 +145,5 @@ export const readCertificate = defineOperation({
   description: "What was signed, as a PDF to file: duct, figure, conditions, instrument, readings, working, airflow with its uncertainty and verdict, checks, and a code that leads to the page where anyone can check it.",
   params,
   answer: z.string(),
-  problems: ["not-found", "not-issued"],
+  problems: ["not-found", "not-issued", "record-altered"],
 });

@@ -1,4 +1,5 @@
 import type { z } from "zod";
+import { database } from "@/db/connection";
 import { ENVIRONMENT_COOKIE, environmentFrom } from "@/lib/records/environments";
 import type { RecordContext } from "@/lib/records/context";
 import { cookieOf } from "./cookies";
@@ -24,6 +25,15 @@ export function portalRecordOperation<Body extends z.ZodType, Params extends z.Z
       const realm = { organisationId: caller.organisation.id, environment };
       return { body: await inTransaction((db) => run({ db, realm, by: { userId: caller.userId }, caller, input, params })) };
     });
+    return handler(request, context);
+  };
+}
+
+/** A file made of a record, for any member who asks for it. */
+export function portalFile<Params extends z.ZodType>(params: Params, make: (reading: Pick<RecordContext, "db" | "realm">, params: z.output<Params>) => Promise<Response>): Handler {
+  return (request, context) => {
+    const environment = environmentFrom(cookieOf(request, ENVIRONMENT_COOKIE));
+    const handler = portalOperation({ access: "viewer", params }, ({ caller, params: given }) => make({ db: database(), realm: { organisationId: caller.organisation.id, environment } }, given));
     return handler(request, context);
   };
 }

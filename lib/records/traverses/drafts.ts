@@ -3,6 +3,8 @@ import type { traverseChange, traverseFields } from "@/api-spec/records/traverse
 import { newId } from "@/lib/ids/newId";
 import type { RecordContext } from "../context";
 import { addHistory } from "../history";
+import { deleteAttachmentsOf } from "../attachments/change";
+import { deleteObjectsAfterCommit } from "../attachments/objects";
 import { noSuchReference } from "../noSuchRecord";
 import { projects } from "../projects";
 import { addRecord, recordsOf } from "../realm";
@@ -39,6 +41,7 @@ export async function changeTraverse(context: RecordContext, id: string, change:
 export async function deleteTraverse(context: RecordContext, id: string, requireMatch: (version: number) => void): Promise<void> {
   const row = await findDraft(context, id);
   requireMatch(row.version);
+  deleteObjectsAfterCommit(context.db, await deleteAttachmentsOf(context.db, context.realm, id));
   await recordsOf(context.db, "traverse_history", context.realm).where("traverse_id", id).delete();
   await traverses(context).where("traverses.id", id).delete();
 }

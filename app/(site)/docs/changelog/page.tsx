@@ -13,7 +13,10 @@ export default function ChangelogPage() {
         <ul>
           <li>Calculations: duct area, traverse plan, air density, density correction, average velocity, airflow, reconciliation, fan adjustment, system balance, and batches of them.</li>
           <li>Keys with scopes, environments, expiry, networks, rotation and revocation.</li>
-          <li>Usage by day, operation and status.</li>
+          <li>Usage by day, operation and status, in the portal and as an operation.</li>
+          <li>Plans and airflows as drawings.</li>
+          <li>Records: projects, instruments with calibrations, traverses from draft to issued to superseded or void, attachments, history, figures, certificates, signatures and their verification.</li>
+          <li>Events and webhooks.</li>
         </ul>
       </div>
     </>
