@@ -227,3 +227,12 @@ describe("cividis", () => {
     expect(cividis(2)).toBe(cividis(1));
   });
 });
+
+describe("the colours of a traverse with a slip", () => {
+  it("are spread over the readings that are no slips", () => {
+    const lines = [[900, 1000, 1010, 960, 890], [905, 1004, 1020, 970, 893], [902, 9990, 1015, 965, 891]];
+    const checks = [{ code: "possible_slip", passed: false, at: [{ line: 3, point: 2 }] }] as never;
+    const { range } = readingModel({ duct: { shape: "rectangular", measured: "inside", width: { value: 20, unit: "in" }, height: { value: 12, unit: "in" } }, readings: { kind: "velocity", unit: "ft/min", lines }, result: { checks } });
+    expect(range).toEqual({ low: 890, high: 1020 });
+  });
+});

@@ -38,7 +38,7 @@ export interface ReadingModel {
   /** Whether the places are those of a rule, or spread evenly for want of one. */
   byRule: boolean;
   readings: DrawnReading[];
-  /** Lowest and highest of what the colour stands for; null where there is nothing to colour. */
+  /** Lowest and highest of what the colour stands for, suspected slips left out; null where there is nothing to colour. */
   range: { low: number; high: number } | null;
   /** What the colour stands for, with its unit. */
   colour: { quantity: "velocity" | "velocity pressure" | "reading"; unit: string | null };
@@ -71,10 +71,12 @@ export function readingModel({ duct, readings, layout, enterFrom, result }: Read
 }
 
 function rangeOf(readings: readonly DrawnReading[]): ReadingModel["range"] {
-  const values = readings.flatMap(({ coloured }) => (coloured === null ? [] : [coloured]));
+  // One slip of the pen would otherwise paint all the others the same dark blue.
+  const trusted = readings.filter(({ suspected, coloured }) => !suspected && coloured !== null);
+  const values = (trusted.length > 0 ? trusted : readings).flatMap(({ coloured }) => (coloured === null ? [] : [coloured]));
   if (values.length === 0) return null;
   return { low: values.reduce((least, value) => Math.min(least, value), Infinity), high: values.reduce((greatest, value) => Math.max(greatest, value), -Infinity) };
 }
 
 /** Place of a value between the lowest and the highest, 0 to 1; in the middle where all are the same. */
-export const shareOf = (value: number, { low, high }: { low: number; high: number }): number => (high > low ? (value - low) / (high - low) : 0.5);
+export const shareOf = (value: number, { low, high }: { low: number; high: number }): number => (high > low ? Math.min(1, Math.max(0, (value - low) / (high - low))) : 0.5);
