@@ -28,8 +28,9 @@ export async function readCall<Body extends z.ZodType, Answer extends z.ZodType,
   context: Context,
   passage: Passage,
 ): Promise<Call<z.output<Body>, z.output<Query>, z.output<Params>>> {
+  if (definition.body) passage.sent = await readJson(request, definition.maxBodyBytes);
   return {
-    input: definition.body && validate(definition.body, await readJson(request, definition.maxBodyBytes)),
+    input: definition.body && validate(definition.body, passage.sent),
     query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),
     params: definition.params && validate(definition.params, await context.params, "path"),
     key: passage.key,
@@ -68,7 +69,7 @@ export function operation<Body extends z.ZodType, Answer extends z.ZodType, Quer
       endPassage(definition, passage, status, null);
       return response;
     } catch (error) {
-      const problem = toProblem(error, passage.requestId);
+      const problem = toProblem(error, passage.requestId, passage.sent);
       const response = problemResponse(problem, passage.requestId);
       endPassage(definition, passage, response.status, problem.slug);
       return withHeaders(response, passage);

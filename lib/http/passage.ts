@@ -21,6 +21,8 @@ export interface Passage {
   limits: Record<string, string>;
   /** Calculations asked for: one, but for a batch. */
   items: number;
+  /** The body, once it was read. */
+  sent?: unknown;
 }
 
 export const beginPassage = (): Passage => ({
@@ -93,9 +95,9 @@ export function endPassage(definition: OperationDefinition, passage: Passage, st
 }
 
 /** The problem to answer with. What the caller did not cause is logged, and told without particulars. */
-export function toProblem(error: unknown, requestId: string): Problem {
+export function toProblem(error: unknown, requestId: string, sent?: unknown): Problem {
   if (error instanceof Problem) return error;
-  if (error instanceof AirflowInputError) return impossibleInput(error);
+  if (error instanceof AirflowInputError) return impossibleInput(error, sent);
   if (isDatabaseAway(error)) {
     log().warn({ err: error, requestId }, "the database does not answer");
     return new Problem("temporarily-unavailable", { detail: "The database does not answer. Nothing was stored; repeat the request.", headers: { "Retry-After": "2" } });

@@ -45,7 +45,7 @@ export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType
       endPassage(definition, passage, response.status, null);
       return withHeaders(response, passage);
     } catch (error) {
-      const problem = toProblem(error, passage.requestId);
+      const problem = toProblem(error, passage.requestId, passage.sent);
       const response = problemResponse(problem, passage.requestId);
       endPassage(definition, passage, response.status, problem.slug);
       return withHeaders(response, passage);
@@ -105,7 +105,7 @@ function kept(result: RecordResult<unknown> | Response, definition: OperationDef
   return {
     status: definition.status ?? 200,
     headers: {
-      "Content-Type": "application/json",
+      ...(definition.status !== 204 && { "Content-Type": "application/json" }),
       "Cache-Control": "private, no-cache",
       ...(version !== undefined && { ETag: etagOf(version) }),
       ...(location && { Location: `/api/v1${location}` }),

@@ -97,6 +97,10 @@ function shown(value: unknown): string {
   return text.length > 60 ? `${text.slice(0, 57)}…` : text;
 }
 
+function existingPart(root: unknown, path: readonly PropertyKey[]): readonly PropertyKey[] {
+  return path.length === 0 || valueAt(root, path) !== undefined ? path : existingPart(root, path.slice(0, -1));
+}
+
 function valueAt(root: unknown, path: readonly PropertyKey[]): unknown {
   let value = root;
   for (const part of path) {
@@ -106,8 +110,11 @@ function valueAt(root: unknown, path: readonly PropertyKey[]): unknown {
   return value;
 }
 
-/** The engine's own refusal of an input, as a problem. */
-export function impossibleInput(error: AirflowInputError): Problem {
-  const errors = error.faults.map(({ path, code, detail }) => ({ pointer: pointerTo(path), code, detail }));
+/**
+ * The engine's own refusal of an input, as a problem.
+ * @param sent What the caller sent, where that is at hand: what is missing in it is pointed at through what lacks it.
+ */
+export function impossibleInput(error: AirflowInputError, sent?: unknown): Problem {
+  const errors = error.faults.map(({ path, code, detail }) => ({ pointer: pointerTo(sent === undefined ? path : existingPart(sent, path)), code, detail }));
   return new Problem("impossible-input", { detail: summary(errors), errors });
 }

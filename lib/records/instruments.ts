@@ -68,7 +68,7 @@ export async function createInstrument(context: RecordContext, fields: Fields): 
 
 export async function listInstruments(context: Reading, { q, dueBefore, ...page }: z.output<typeof instrumentsQuery>): Promise<Page<StoredInstrument>> {
   const query = instruments(context);
-  if (q) query.where((some) => some.whereLike("instruments.name", containing(q)).orWhereLike("instruments.serial_number", containing(q)));
+  if (q) query.where((some) => some.where("instruments.name", "like", containing(q)).orWhere("instruments.serial_number", "like", containing(q)));
   if (dueBefore) query.where("instruments.calibration_due", "<", dueBefore);
   const order = dueBefore
     ? { column: "instruments.calibration_due", direction: "asc" as const, valueOf: ({ calibration_due }: InstrumentRow) => dayOf(calibration_due!) }

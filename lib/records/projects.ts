@@ -44,7 +44,7 @@ export async function createProject(context: RecordContext, fields: z.output<typ
 
 export async function listProjects(context: Reading, { q, ...page }: z.output<typeof projectsQuery>): Promise<Page<Project>> {
   const query = projects(context);
-  if (q) query.where((some) => some.whereLike("projects.name", containing(q)).orWhereLike("projects.number", containing(q)));
+  if (q) query.where((some) => some.where("projects.name", "like", containing(q)).orWhere("projects.number", "like", containing(q)));
   const { items, next } = await pageOf(query, "projects", { column: "projects.name", direction: "asc", valueOf: ({ name }: ProjectRow) => name }, page);
   return { items: items.map(projectOf), next };
 }

@@ -24,12 +24,12 @@ export function runItem(item: unknown, index: number, requestId: string, pointer
     const calculate = CALCULATIONS[operation as BatchOperationName] as (input: unknown) => unknown;
     return { index, status: 200, result: calculate(validate(bodies.get(operation)!, input)) };
   } catch (error) {
-    return failedItem(error, index, requestId, at);
+    return failedItem(error, index, requestId, at, at === pointer ? undefined : (item as { input: unknown }).input);
   }
 }
 
-export function failedItem(error: unknown, index: number, requestId: string, pointer: string): ItemResult {
-  const problem = toProblem(error, requestId);
+export function failedItem(error: unknown, index: number, requestId: string, pointer: string, sent?: unknown): ItemResult {
+  const problem = toProblem(error, requestId, sent);
   const body = problemBody(problem, requestId);
   const errors = problem.details.errors?.map((fault) => ({ ...fault, pointer: pointer + fault.pointer }));
   return { index, status: PROBLEMS[problem.slug].status, problem: { ...body, ...(errors && { errors }) } };

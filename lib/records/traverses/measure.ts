@@ -1,6 +1,7 @@
 import { airflow, type AirflowAnswer } from "@/lib/airflow/calculations/airflow";
 import { ductArea } from "@/lib/airflow/calculations/ductArea";
 import { AirflowInputError } from "@/lib/airflow/errors";
+import { planTraverse } from "@/lib/airflow/layout/plan";
 import type { Instrument, Readings } from "@/lib/airflow/types";
 import { fromSi, toSi } from "@/lib/airflow/units/convert";
 import { UNITS, type QuantityOf } from "@/lib/airflow/units/units";
@@ -34,8 +35,7 @@ export function measurementOf(input: TraverseInput, instrument: DatedInstrument 
 export function measure(input: TraverseInput, instrument: DatedInstrument | null): Measured {
   const measurement = measurementOf(input, instrument);
   if (measurement === null) {
-    // So that a duct that cannot be is told of at once, and not when the last reading comes in.
-    if (input.duct) ductArea({ duct: input.duct });
+    requirePlan(input);
     return NOTHING;
   }
   const { points: _points, enterFrom: _enterFrom, ...calculated } = measurement;
@@ -47,6 +47,13 @@ export function measure(input: TraverseInput, instrument: DatedInstrument | null
     percent_of_design: design?.percent ?? null,
     outside_tolerance: design ? Math.abs(design.percent - 100) > design.tolerancePercent : null,
   };
+}
+
+/** So that a duct or a plan that cannot be is told of at once, and not when the last reading comes in. */
+function requirePlan({ duct, layout, points, enterFrom, probe, site }: TraverseInput): void {
+  if (!duct) return;
+  if (layout) planTraverse({ duct, layout, points, enterFrom, probe, site });
+  else ductArea({ duct });
 }
 
 /** An instrument as the calculation takes it: its calibration's offset in the unit of the readings. */
