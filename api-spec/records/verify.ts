@@ -26,5 +26,6 @@ export const verify = defineOperation({
         .meta({ id: "VerifiedRecord", description: "What has become of a signed record." }),
     ).describe("Null where the signature does not hold, or the record is not on this installation."),
   }),
+  problems: ["burst-limit-reached"],
   maxBodyBytes: 6 * 1024 ** 2,
 });

@@ -8,7 +8,7 @@ import { requireSignedIn } from "@/app/_session";
 import { ResendVerification } from "./ResendVerification";
 
 const NAV = [
-  { items: [{ href: "/overview", label: "Overview" }, { href: "/keys", label: "Keys" }, { href: "/usage", label: "Usage" }] },
+  { items: [{ href: "/overview", label: "Overview" }, { href: "/bench", label: "Bench" }, { href: "/keys", label: "Keys" }, { href: "/usage", label: "Usage" }] },
   {
     heading: "Records",
     items: [

@@ -5,7 +5,7 @@ import { accessibilityFindings, at, openBrowser, overflow } from "../support/bro
 import { openAccount, portal, sessionOf, PASSWORD } from "../support/portal";
 
 const PUBLIC = ["/", "/sign-in", "/sign-up", "/forgot-password", "/reset-password", "/verify-email", "/mailbox", "/docs", "/docs/units", "/docs/problems", "/docs/problems/invalid-request", "/docs/cautions", "/docs/changelog", "/nowhere"];
-const MEMBER = ["/overview", "/keys", "/keys/new", "/usage"];
+const MEMBER = ["/overview", "/bench", "/keys", "/keys/new", "/usage"];
 const ADMINISTRATOR = ["/admin", "/admin/usage"];
 
 describe("every page, in both themes, wide and narrow", () => {

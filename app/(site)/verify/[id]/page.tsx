@@ -12,7 +12,7 @@ import { verifyRecord } from "@/lib/records/verifyRecord";
 import { CheckItYourself } from "./CheckItYourself";
 import { Facts } from "./Facts";
 import { Outcome } from "./Outcome";
-import { ResultHead } from "./ResultHead";
+import { ResultHead } from "@/app/_components/data/ResultHead";
 import { Standing } from "./Standing";
 
 interface Props {

@@ -1,5 +1,5 @@
-import { VerdictBand } from "@/app/_components/figures/VerdictBand";
-import { formatNumber, formatQuantity, unitSymbol } from "@/app/_components/format/number";
+import { VerdictBand } from "../figures/VerdictBand";
+import { formatNumber, formatQuantity, unitSymbol } from "../format/number";
 import type { AirflowAnswer } from "@/lib/airflow/calculations/airflow";
 
 /** The airflow, how sure it is, and what it says of the design. */
