@@ -20,7 +20,7 @@ import { ReadingsSheet } from "./ReadingsSheet";
 import { SaveAsRecord } from "./SaveAsRecord";
 
 /** A drawing set for a page, and for a telephone. */
-const WIDE = 720;
+const WIDE = 540;
 const NARROW = 360;
 const NARROW_SCREEN = "(max-width: 640px)";
 

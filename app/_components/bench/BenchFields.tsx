@@ -57,7 +57,7 @@ function Row({ legend, children }: { legend: string; children: ReactNode }) {
   return (
     <fieldset>
       <legend className="mb-1 text-small font-semibold">{legend}</legend>
-      <div className="grid grid-cols-2 items-end gap-x-4 gap-y-3 sm:grid-cols-3 lg:grid-cols-6">{children}</div>
+      <div className="grid grid-cols-2 items-end gap-x-4 gap-y-3 sm:grid-cols-3 lg:grid-cols-5">{children}</div>
     </fieldset>
   );
 }

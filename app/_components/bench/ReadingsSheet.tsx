@@ -55,47 +55,50 @@ export function ReadingsSheet({ lines, unit, onChange, suspected }: ReadingsShee
   };
 
   return (
-    <div className="overflow-x-auto">
-      <table ref={table} className="border-collapse font-mono text-small">
-        <caption className="pb-2 text-left font-sans">
-          Readings, {unit} <span className="text-muted">A blank left empty is a point that could not be read. Paste a column or a block.</span>
-        </caption>
-        <thead>
-          <tr className="border-t-2 border-b border-t-ink border-b-ink">
-            <th scope="col" className="px-2 py-1 text-left font-sans text-fine font-normal text-muted">Point</th>
-            {lines.map((_, line) => (
-              <th key={line} scope="col" className="px-1 py-1 text-center font-sans text-fine font-normal text-muted">Hole {line + 1}</th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {Array.from({ length: rows }, (_, point) => (
-            <tr key={point} className="border-b">
-              <th scope="row" className="px-2 text-left font-normal text-muted">{point + 1}</th>
-              {lines.map((line, index) => (
-                <td key={index} className="border-l p-0">
-                  {line[point] !== undefined && (
-                    <input
-                      data-cell={`${index}/${point}`}
-                      aria-label={`Hole ${index + 1}, point ${point + 1}`}
-                      inputMode="decimal"
-                      autoComplete="off"
-                      value={line[point]}
-                      onChange={(event) => set([{ line: index, point, text: event.target.value }])}
-                      onKeyDown={(event) => move(event, index, point)}
-                      onPaste={(event) => paste(event, index, point)}
-                      onFocus={(event) => event.target.select()}
-                      aria-invalid={Number.isNaN(numberIn(line[point]!)) || undefined}
-                      className={`block h-9 w-20 min-w-0 bg-transparent px-1 text-center -outline-offset-2 focus:bg-action-wash aria-[invalid=true]:text-rust aria-[invalid=true]:underline ${suspected.has(`${index + 1}/${point + 1}`) ? "font-semibold text-rust ring-2 ring-rust ring-inset" : ""}`}
-                    />
-                  )}
-                </td>
+    <>
+      <p className="pb-2 text-small">
+        Readings, {unit} <span className="text-muted">A blank left empty is a point that could not be read. Paste a column or a block.</span>
+      </p>
+      <div className="overflow-x-auto">
+        <table ref={table} className="border-collapse font-mono text-small">
+          <caption className="sr-only">Readings, {unit}</caption>
+          <thead>
+            <tr className="border-t-2 border-b border-t-ink border-b-ink">
+              <th scope="col" className="px-2 py-1 text-left font-sans text-fine font-normal text-muted">Point</th>
+              {lines.map((_, line) => (
+                <th key={line} scope="col" className="px-1 py-1 text-center font-sans text-fine font-normal text-muted">Hole {line + 1}</th>
               ))}
             </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+          </thead>
+          <tbody>
+            {Array.from({ length: rows }, (_, point) => (
+              <tr key={point} className="border-b">
+                <th scope="row" className="px-2 text-left font-normal text-muted">{point + 1}</th>
+                {lines.map((line, index) => (
+                  <td key={index} className="border-l p-0">
+                    {line[point] !== undefined && (
+                      <input
+                        data-cell={`${index}/${point}`}
+                        aria-label={`Hole ${index + 1}, point ${point + 1}`}
+                        inputMode="decimal"
+                        autoComplete="off"
+                        value={line[point]}
+                        onChange={(event) => set([{ line: index, point, text: event.target.value }])}
+                        onKeyDown={(event) => move(event, index, point)}
+                        onPaste={(event) => paste(event, index, point)}
+                        onFocus={(event) => event.target.select()}
+                        aria-invalid={Number.isNaN(numberIn(line[point]!)) || undefined}
+                        className={`block h-9 w-20 min-w-0 bg-transparent px-1 text-center -outline-offset-2 focus:bg-action-wash aria-[invalid=true]:text-rust aria-[invalid=true]:underline ${suspected.has(`${index + 1}/${point + 1}`) ? "font-semibold text-rust ring-2 ring-rust ring-inset" : ""}`}
+                      />
+                    )}
+                  </td>
+                ))}
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
+    </>
   );
 }
 
