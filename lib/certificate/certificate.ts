@@ -10,7 +10,7 @@ import { figure } from "./sections/figure";
 import { head, TITLE_WORDS } from "./sections/head";
 import { placeIdentity } from "./sections/identity";
 import { airFacts, ductFacts, instrumentFacts } from "./sections/measurement";
-import { placeReadings, readingBlock, readingTable, RIGHT_GAP } from "./sections/readings";
+import { placeReadings, readingBlock, readingTable } from "./sections/readings";
 import { placeStandings } from "./sections/standing";
 import { placeWorking } from "./sections/working";
 import { Sheet } from "./sheet";
@@ -24,11 +24,15 @@ const GUTTER = 14;
 const FIGURE_WIDTH = 192;
 const HIGHEST_FIGURE = 250;
 /** Width that the names of the checks need. */
-const LEAST_FOR_CHECKS = 110;
+const CHECKS_WIDTH = 124;
 /** Beyond this facts stand in rows of the whole width. */
 const HIGHEST_FACTS = 260;
 /** Beyond this a table of readings has the page's width to itself. */
 const HIGHEST_BESIDE = 150;
+
+/** What is left over for a second page, up to so much of it, is brought onto the first by drawing all a little smaller. */
+const SMALLER = 0.92;
+const LEFT_OVER = 0.12;
 
 /**
  * The certificate of an issued traverse, as a tagged PDF. The same document and options always come to the same bytes.
@@ -37,9 +41,24 @@ const HIGHEST_BESIDE = 150;
  * @returns The file: US Letter for results in `ip`, A4 for `si`.
  */
 export async function certificate(document: IssuedDocument, options: CertificateOptions): Promise<Buffer> {
+  const usual = compose(document, options, 1);
+  if (usual.pages !== 2 || usual.lastPage > LEFT_OVER) return usual.sheet.finish();
+  const smaller = compose(document, options, SMALLER);
+  return (smaller.pages === 1 ? smaller : usual).sheet.finish();
+}
+
+interface Composed {
+  sheet: Sheet;
+  pages: number;
+  /** How much of the last page is taken, 0 to 1. */
+  lastPage: number;
+}
+
+function compose(document: IssuedDocument, options: CertificateOptions, scale: number): Composed {
   const system = document.measurement.units ?? "ip";
   const about = [document.system, document.location].filter(Boolean).join(", ");
   const sheet = new Sheet({
+    scale,
     size: system === "ip" ? "LETTER" : "A4",
     title: `${TITLE_WORDS}${about ? `: ${about}` : ""}, revision ${document.revision}`,
     author: document.organisation.name,
@@ -65,7 +84,7 @@ export async function certificate(document: IssuedDocument, options: Certificate
     if (flow.top !== before) flow.gap(GAP);
   }
   numberPages(context);
-  return sheet.finish();
+  return { sheet, pages: sheet.doc.bufferedPageRange().count, lastPage: 1 - flow.remaining / flow.page };
 }
 
 /** Duct, air and instrument beside each other; where the words are too long for columns, one below the other. */
@@ -91,10 +110,13 @@ const factGroup = (sheet: Sheet, title: string, facts: readonly Fact[], width: n
 function placeMeasurement(context: Context, flow: Flow): void {
   const { sheet, document } = context;
   const width = sheet.width - FIGURE_WIDTH - GUTTER;
-  const readings = readingTable(context, width);
-  const beyond = width - readings.width - RIGHT_GAP;
-  const passed = beyond < LEAST_FOR_CHECKS ? null : passedChecks(sheet, document.result.checks, beyond, 1);
-  const few = readingBlock(context, readings, passed);
+  const narrow = width - CHECKS_WIDTH - GUTTER;
+  const checked = stacked([heading(sheet, "Checks", CHECKS_WIDTH), passedChecks(sheet, document.result.checks, CHECKS_WIDTH, 1)]);
+  const besideChecks = readingTable(context, narrow);
+  const roomy = besideChecks.parts.length <= 1;
+  const few = roomy
+    ? beside([{ at: 0, block: readingBlock(context, besideChecks) }, { at: width - CHECKS_WIDTH, block: checked }])
+    : readingBlock(context, readingTable(context, width));
   const together = few.height <= HIGHEST_BESIDE;
   const column = stacked([...(together ? [few] : []), budget(context, width)], GAP);
   flow.place(beside([{ at: 0, block: figure(context, FIGURE_WIDTH, HIGHEST_FIGURE) }, { at: FIGURE_WIDTH + GUTTER, block: column }]));
@@ -103,5 +125,5 @@ function placeMeasurement(context: Context, flow: Flow): void {
     placeReadings(context, flow, readingTable(context, sheet.width));
   }
   flow.gap(GAP);
-  placeChecks(context, flow, together && passed !== null);
+  placeChecks(context, flow, together && roomy);
 }

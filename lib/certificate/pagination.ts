@@ -24,7 +24,7 @@ export function numberPages({ sheet, document, options }: Context): void {
         sheet.write(`Record ${document.id}, revision ${document.revision}`, right, y, { ...HEAD, face: "figures", size: 6.6 }, "right");
         doc.moveTo(sheet.left, y + 5).lineTo(right, y + 5).lineWidth(0.5).strokeColor(RULE).stroke();
       }
-      const foot = doc.page.height - MARGIN.bottom + 14;
+      const foot = sheet.bottom + 14;
       sheet.write(`Averduct, engine ${document.engineVersion}. Figures are as signed; verify them before relying on a copy.`, sheet.left, foot, { ...HEAD, size: 6.4 });
       sheet.write(`page ${page + 1} of ${count}`, right, foot, { ...HEAD, face: "strong" }, "right");
     }, "Pagination");

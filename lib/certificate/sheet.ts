@@ -7,9 +7,13 @@ export interface Style {
   face: Face;
   size: number;
   colour?: string;
+  /** The words are a formula: what follows `_` stands lower, what follows `^` higher. */
+  formula?: boolean;
 }
 
 export interface SheetSettings {
+  /** Everything is drawn this much smaller than its size says, and the page holds so much more. */
+  scale: number;
   size: "LETTER" | "A4";
   title: string;
   author: string;
@@ -22,8 +26,18 @@ export interface TagOptions {
   alt?: string;
   title?: string;
   scope?: "Row" | "Column";
+  /** Left, top, right and bottom of a figure. */
   bbox?: [number, number, number, number];
 }
+
+/** A run with its size, and how far below the base line it stands. */
+interface Piece extends Run {
+  size: number;
+  drop: number;
+}
+
+/** An index or an exponent in a formula as the engine writes it: `p_v`, `x^n`. */
+const INDEX = /([_^])([A-Za-z0-9*]+)/;
 
 export const MARGIN = { side: 36, top: 25, bottom: 29 };
 
@@ -36,13 +50,17 @@ export class Sheet {
   readonly #fonts = new Fonts();
   readonly #registered = new Set<string>();
   readonly #runs = new Map<string, readonly Run[]>();
+  readonly #scale: number;
   #element: PDFKit.PDFStructureElement;
 
-  constructor({ size, title, author, subject, created }: SheetSettings) {
+  constructor({ scale, size, title, author, subject, created }: SheetSettings) {
     const info = { Title: title, Author: author, Subject: subject, Creator: "Averduct", Producer: "Averduct", CreationDate: created, ModDate: created };
     // The first font is opened when something is written: pdfkit would otherwise open one that the page does not use.
-    const options = { size, margin: 0, info, pdfVersion: "1.7", tagged: true, lang: "en", displayTitle: true, bufferPages: true, font: null } as unknown as PDFKit.PDFDocumentOptions;
+    const options = { size, margin: 0, info, pdfVersion: "1.7", tagged: true, lang: "en", displayTitle: true, bufferPages: true, autoFirstPage: false, font: null } as unknown as PDFKit.PDFDocumentOptions;
+    this.#scale = scale;
     this.doc = new PDFDocument(options);
+    this.doc.on("pageAdded", () => this.doc.scale(scale));
+    this.doc.addPage();
     this.#element = this.doc.struct("Document");
     this.doc.addStructure(this.#element);
   }
@@ -51,16 +69,17 @@ export class Sheet {
     return MARGIN.side;
   }
   get width(): number {
-    return this.doc.page.width - 2 * MARGIN.side;
+    return this.doc.page.width / this.#scale - 2 * MARGIN.side;
   }
   get bottom(): number {
-    return this.doc.page.height - MARGIN.bottom;
+    return this.doc.page.height / this.#scale - MARGIN.bottom;
   }
 
   /** An element of the structure round whatever is written meanwhile. */
   within(type: string, body: () => void, options: TagOptions = {}): void {
     const outer = this.#element;
-    const element = this.doc.struct(type, options as PDFKit.Mixins.StructureElementOptions);
+    const placed = { ...options, ...(options.bbox && { bbox: options.bbox.map((edge) => edge * this.#scale) }) };
+    const element = this.doc.struct(type, placed as PDFKit.Mixins.StructureElementOptions);
     outer.add(element);
     this.#element = element;
     body();
@@ -85,19 +104,19 @@ export class Sheet {
     this.doc.endMarkedContent();
   }
 
-  widthOf(words: string, { face, size }: Style): number {
-    return this.#runsOf(words, face).reduce((sum, run) => sum + this.#font(run.file).fontSize(size).widthOfString(run.words), 0);
+  widthOf(words: string, style: Style): number {
+    return this.#piecesOf(words, style).reduce((sum, { file, words: piece, size }) => sum + this.#font(file).fontSize(size).widthOfString(piece), 0);
   }
 
   /** One line of words on a base line. `x` is its left, its middle or its right. */
-  write(words: string, x: number, y: number, { face, size, colour = INK }: Style, align: "left" | "middle" | "right" = "left"): void {
-    const runs = this.#runsOf(words, face);
+  write(words: string, x: number, y: number, style: Style, align: "left" | "middle" | "right" = "left"): void {
     let at = x;
-    if (align !== "left") at -= this.widthOf(words, { face, size }) * (align === "right" ? 1 : 0.5);
-    for (const run of runs) {
-      this.#font(run.file).fontSize(size);
-      const wide = this.doc.widthOfString(run.words);
-      this.doc.fillColor(colour).text(run.words, at, y, { lineBreak: false, baseline: "alphabetic" });
+    if (align !== "left") at -= this.widthOf(words, style) * (align === "right" ? 1 : 0.5);
+    this.doc.fillColor(style.colour ?? INK);
+    for (const { file, words: piece, size, drop } of this.#piecesOf(words, style)) {
+      this.#font(file).fontSize(size);
+      const wide = this.doc.widthOfString(piece);
+      this.doc.text(piece, at, y + drop, { lineBreak: false, baseline: "alphabetic" });
       at += wide;
     }
   }
@@ -110,6 +129,17 @@ export class Sheet {
     this.doc.end();
     await done;
     return Buffer.concat(chunks);
+  }
+
+  #piecesOf(words: string, { face, size, formula }: Style): Piece[] {
+    const plain = { size, drop: 0 };
+    if (!formula) return this.#runsOf(words, face).map((run) => ({ ...run, ...plain }));
+    return words.split(INDEX).flatMap((part, index, parts) => {
+      // Parts alternate: plain words, the sign, what it moves.
+      if (index % 3 === 1) return [];
+      const moved = index % 3 === 2 ? { size: size * 0.74, drop: size * (parts[index - 1] === "_" ? 0.18 : -0.34) } : plain;
+      return this.#runsOf(part, face).map((run) => ({ ...run, ...moved }));
+    });
   }
 
   #runsOf(words: string, face: Face): readonly Run[] {

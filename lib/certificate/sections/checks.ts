@@ -8,11 +8,11 @@ import { flowing, INDENT, paragraph, sideHeading } from "../text";
 
 const NAMES: Record<CheckCode, string> = {
   points_below_minimum: "Number of points",
-  uniformity: "Evenness of the profile",
+  uniformity: "Profile evenness",
   negative_reading: "Negative readings",
   low_velocity: "Low velocity",
   site_disturbance: "Straight lengths",
-  profile_asymmetry: "Symmetry of the profile",
+  profile_asymmetry: "Profile symmetry",
   possible_slip: "Possible slips",
   density_assumed: "Density assumed",
   probe_blockage: "Probe blockage",

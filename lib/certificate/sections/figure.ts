@@ -5,7 +5,7 @@ import { drawSvg } from "../svg/drawSvg";
 import { parseSvg } from "../svg/parseSvg";
 
 /** Units of the drawing across; fewer make its letters larger on the page. */
-const DRAWN = 340;
+const DRAWN = 320;
 
 /** The cross-section with its readings, as vectors. */
 export function figure({ sheet, document, system }: Context, width: number, highest: number): Block {

@@ -1,12 +1,15 @@
-import { INK } from "../colours";
+import { INK, MUTED } from "../colours";
 import { beside, stacked, type Block, type Flow } from "../flow";
 import type { Context } from "../options";
 import { quantity } from "../quantities";
 import type { Sheet, Style } from "../sheet";
-import { heading, paragraph } from "../text";
+import { ascent, leading } from "../styles";
+import { heading } from "../text";
+import { wrap } from "../type/wrap";
 import { condense, type CondensedStep } from "./condense";
 
-const EQUATION: Style = { face: "text", size: 6.8, colour: INK };
+const EQUATION: Style = { face: "text", size: 6.9, colour: INK, formula: true };
+const NAME: Style = { face: "text", size: 6.9, colour: MUTED };
 const GUTTER = 14;
 /** Digits that let a reader redo the arithmetic and meet the figures of the certificate. */
 const DIGITS = 6;
@@ -33,9 +36,22 @@ export function placeWorking({ sheet, document }: Context, flow: Flow): void {
 }
 
 function stepBlock(sheet: Sheet, { step, equation, value, given }: CondensedStep, width: number): Block {
+  const name = `${step}: `;
   const result = value ? `${equation} = ${quantity(value, DIGITS)}` : `${equation}, values below the readings`;
   const inputs = given.map(([symbol, input]) => `${symbol} ${quantity(input, DIGITS)}`).join(", ");
-  return stacked([paragraph(sheet, `${step}: ${result}${inputs ? `; ${inputs}` : ""}`, EQUATION, width), { height: 0.4, draw: () => {} }]);
+  const lines = wrap(sheet, `${name}${result}${inputs ? `; ${inputs}` : ""}`, EQUATION, width);
+  return {
+    height: lines.length * leading(EQUATION) + 0.3,
+    draw: (x, y) =>
+      sheet.tagged("P", () =>
+        lines.forEach((line, index) => {
+          const base = y + ascent(EQUATION) + index * leading(EQUATION);
+          const named = index === 0 && line.startsWith(name);
+          if (named) sheet.write(name, x, base, NAME);
+          sheet.write(named ? line.slice(name.length) : line, named ? x + sheet.widthOf(name, NAME) : x, base, EQUATION);
+        }),
+      ),
+  };
 }
 
 const heightOf = (blocks: readonly Block[]): number => blocks.reduce((sum, { height }) => sum + height, 0);

@@ -33,16 +33,15 @@ export function runsOf(line: string, face: Face, fonts: Fonts): Run[] {
   for (const { segment, index } of graphemes.segment(line)) {
     const level = levels?.[index] ?? 0;
     const last = runs.at(-1);
-    const piece = inFont(segment, face, fonts, level % 2 === 0 ? last?.file : undefined);
-    if (last && last.file === piece.file && last.level === level && !(level % 2 === 1 && segment === " ")) last.words += piece.words;
+    const piece = inFont(segment, face, fonts);
+    if (last && last.file === piece.file && last.level === level) last.words += piece.words;
     else runs.push({ ...piece, level });
   }
   return levels ? visualOrder(runs) : runs;
 }
 
-/** A space stays in the font of the word before it. A character that no font has is written by its number. */
-function inFont(segment: string, face: Face, fonts: Fonts, before: string | undefined): Run {
-  if (segment === " " && before) return { file: before, words: segment };
+/** A character that no font has is written by its number. */
+function inFont(segment: string, face: Face, fonts: Fonts): Run {
   const words = segment.replace(WITHOUT_SIGN, "") || " ";
   const codePoints = [...words].map((character) => character.codePointAt(0)!);
   const file = fonts.fileFor(face, codePoints);
