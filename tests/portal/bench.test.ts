@@ -1,9 +1,10 @@
 import type { Browser, BrowserContext, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { calculate } from "../support/api";
-import { makeKey } from "../support/accounts";
+import { makeKey, testDatabase } from "../support/accounts";
 import { at, openBrowser } from "../support/browser";
 import { openAccount } from "../support/portal";
+import { partner } from "../support/records";
 
 /** Two diameters of six by log-linear, as a spreadsheet puts them on the clipboard. */
 const BLOCK = [[812, 798], [934, 926], [1010, 1013], [1004, 1009], [921, 930], [806, 811]].map((row) => row.join("\t")).join("\r\n");
@@ -12,9 +13,12 @@ describe("the Bench", () => {
   let browser: Browser;
   let context: BrowserContext;
   let page: Page;
+  let email: string;
   beforeAll(async () => {
     browser = await openBrowser();
-    const [name, value] = (await openAccount()).cookie.split("=") as [string, string];
+    const account = await openAccount();
+    email = account.email;
+    const [name, value] = account.cookie.split("=") as [string, string];
     context = await browser.newContext();
     await context.addCookies([{ name, value, url: process.env.AVERDUCT_TEST_URL! }]);
     page = await context.newPage();
@@ -51,17 +55,19 @@ describe("the Bench", () => {
     expect(await page.evaluate(() => document.activeElement?.getAttribute("aria-label"))).toBe("Hole 1, point 3");
     await page.keyboard.press("ArrowRight");
     expect(await page.evaluate(() => document.activeElement?.getAttribute("aria-label"))).toBe("Hole 2, point 3");
-    await page.keyboard.type("3110");
+    await page.keyboard.type("9013");
     await page.getByText(/Ringed: a reading that looks like a slip/).waitFor();
     await page.getByLabel("Hole 2, point 3", { exact: true }).fill("1013");
   });
 
   it("says what cannot be, in the engine's words", async () => {
+    await page.getByLabel("Measured").selectOption("outside");
     await page.getByLabel("Lining").fill("9");
     await page.getByText("This cannot be").waitFor();
     await page.getByLabel("Lining").fill("x");
     await page.getByText("Write a number").waitFor();
     await page.getByLabel("Lining").fill("");
+    await page.getByLabel("Measured").selectOption("inside");
     await page.getByRole("region", { name: "Result" }).waitFor();
   });
 
@@ -80,8 +86,8 @@ describe("the Bench", () => {
   });
 
   it("keeps it as a record", async () => {
-    const made = await page.evaluate(async () => (await fetch("/api/portal/projects", { method: "POST", headers: { "Content-Type": "application/json" }, body: JSON.stringify({ name: "Marram Point Library" }) })).status);
-    expect(made).toBe(201);
+    const { organisation_id } = await testDatabase()("memberships as m").join("users as u", "u.id", "m.user_id").where("u.email", email).first("m.organisation_id");
+    await (await partner({ organisationId: organisation_id })).send("post", "/projects", { name: "Marram Point Library" }).expect(201);
     await page.goto(at("/bench"));
     await page.getByLabel("Read as").selectOption("velocity");
     await paste("Hole 1, point 1", BLOCK);

@@ -59,7 +59,7 @@ export default async function VerifyPage({ params }: Props) {
           </section>
           <section aria-labelledby="working">
             <SectionHead id="working" measure={`${document.result.working?.length ?? 0} steps`}>Working</SectionHead>
-            <WorkingTable steps={document.result.working ?? []} />
+            <WorkingTable steps={document.result.working ?? []} caption="Working, step by step" />
           </section>
         </>
       )}
