@@ -9,16 +9,32 @@ const RAISED: Readonly<Record<string, string>> = { "2": "²", "3": "³" };
 /** A unit as the trade writes it: "ft³/min". */
 export const unitSymbol = (unit: string): string => SYMBOLS[unit] ?? unit.replace(/(?<=[a-z])[23]/g, (digit) => RAISED[digit]!);
 
+const formats = new Map<string, Intl.NumberFormat>();
+
+/** Formats are dear to make, and a certificate of 1,000 readings writes 2,000 numbers. */
+function written(value: number, least: number, most: number): string {
+  const key = `${least} ${most}`;
+  let format = formats.get(key);
+  if (!format) {
+    format = new Intl.NumberFormat("en", { minimumFractionDigits: least, maximumFractionDigits: most });
+    formats.set(key, format);
+  }
+  return format.format(value).replace("-", "−");
+}
+
+/** Beyond these, digits of a double say nothing. */
+const MOST_DECIMALS = 12;
+
 /** A number to so many significant digits, thousands separated, with a true minus sign. Digits before the point are never rounded away. */
 export function digits(value: number, significant: number): string {
   if (value === 0) return "0";
   const decimals = Math.max(0, significant - 1 - Math.floor(Math.log10(Math.abs(value))));
-  return value.toLocaleString("en", { maximumFractionDigits: Math.min(decimals, 12) }).replace("-", "−");
+  return written(value, 0, Math.min(decimals, MOST_DECIMALS));
 }
 
-/** The same, and noughts at the end stay: a figure measured to that digit. */
+/** A number with exactly so many decimals; no minus sign before nought. */
 export function fixed(value: number, decimals: number): string {
-  const words = value.toLocaleString("en", { minimumFractionDigits: decimals, maximumFractionDigits: decimals }).replace("-", "−");
+  const words = written(value, decimals, decimals);
   return /[1-9]/.test(words) ? words : words.replace("−", "");
 }
 
@@ -29,7 +45,7 @@ export function quantity({ value, unit }: Quantity, significant = 4): string {
 }
 
 /** A length as it was given. */
-export const asGiven = ({ value, unit }: Quantity): string => `${value.toLocaleString("en", { maximumFractionDigits: 12 }).replace("-", "−")} ${unitSymbol(unit)}`;
+export const asGiven = ({ value, unit }: Quantity): string => `${written(value, 0, MOST_DECIMALS)} ${unitSymbol(unit)}`;
 
 /** Lengths that make up a size, in the unit a tape is read in. */
 export const size = (lengths: readonly QuantityOf<"length">[], system: UnitSystem): string => `${lengths.map((length) => tape(toSi("length", length), system)).join(" × ")} ${tapeUnit(system)}`;

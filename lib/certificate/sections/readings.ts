@@ -68,7 +68,7 @@ function readingsOf({ measurement: { readings }, result: { points, checks } }: I
 
 function introduction({ measurement: { readings }, result: { points, checks } }: IssuedDocument): string {
   const kind = readings.kind === "velocity_pressure" ? "Velocity pressure" : "Velocity";
-  const slips = checks.some(({ code, passed }) => code === "possible_slip" && !passed) ? " In rust: looks like a slip." : "";
+  const slips = checks.some(({ code, passed }) => code === "possible_slip" && !passed) ? " Framed: looks like a slip." : "";
   return `${kind}, ${unitSymbol(readings.unit)}; below it the velocity, ${unitSymbol(points[0]?.velocity.unit ?? "")}.${slips}`;
 }
 
@@ -81,14 +81,16 @@ function writtenLines(lines: readonly (readonly (number | null)[])[]): string[][
 
 /** A row of two lines: readings, and their velocities in small figures. */
 function readingRow(sheet: Context["sheet"], columns: readonly Column[], label: number, cells: readonly (Reading | undefined)[]): Block {
+  const height = READING.size * 1.02 + VELOCITY.size * 1.2 + 1.6;
   return {
-    height: READING.size * 1.02 + VELOCITY.size * 1.2 + 1.6,
+    height,
     draw: (x, y) =>
       sheet.within("TR", () => {
         const base = y + READING.size + 0.4;
         sheet.tagged("TH", () => sheet.write(String(label), x, base, { ...READING, face: "strong" }), { scope: "Row" });
         cells.forEach((cell, index) => {
           const { at, width } = columns[index + 1]!;
+          if (cell?.suspected) sheet.artifact(() => sheet.doc.roundedRect(x + at - 2, y - 0.4, width + 4, height - 1, 1.5).lineWidth(0.8).strokeColor(RUST).stroke());
           sheet.tagged("TD", () => {
             if (!cell) return;
             sheet.write(cell.words, x + at + width, base, { ...READING, colour: cell.suspected ? RUST : INK }, "right");
