@@ -104,6 +104,12 @@ export class Sheet {
     this.doc.endMarkedContent();
   }
 
+  /** Makes a surface a link, in the `Link` element that it stands in. */
+  link(x: number, y: number, width: number, height: number, address: string, words: string): void {
+    const options = { structParent: this.#element, Contents: new String(words) } as unknown as PDFKit.Mixins.AnnotationOption;
+    this.doc.link(x, y, width, height, address, options);
+  }
+
   widthOf(words: string, style: Style): number {
     return this.#piecesOf(words, style).reduce((sum, { file, words: piece, size }) => sum + this.#font(file).fontSize(size).widthOfString(piece), 0);
   }

@@ -73,7 +73,7 @@ describe("a certificate", { timeout: 60_000 }, () => {
 
   it("names a waiver with its reason, a point that was not read, and that there is no design", async () => {
     const words = wordsOf(await read(issued(EXHAUST, { instrument: null, calibrationWaiver: { reason: "The laboratory is closed until January." } })));
-    for (const fact of ["no calibration in force", "The laboratory is closed until January.", "No design airflow was given", "Instrument none named"]) expect(words, fact).toContain(close(fact));
+    for (const fact of ["no calibration in force", "The laboratory is closed until January.", "No design airflow was given", "Name not named"]) expect(words, fact).toContain(close(fact));
     expect((await read(issued(EXHAUST))).pages[0]!.items.filter(({ words: cell }) => cell === "–")).toHaveLength(1);
   });
 
@@ -112,6 +112,7 @@ describe("a certificate", { timeout: 60_000 }, () => {
     expect(count("Document")).toBe(1);
     expect(count("H1")).toBe(1);
     expect(count("H2")).toBeGreaterThan(8);
+    expect(count("Link")).toBe(1);
     expect(count("Table")).toBe(6);
     // Each reading, and the cells of the other tables.
     expect(count("TD")).toBeGreaterThan(25);
@@ -130,6 +131,10 @@ describe("a certificate", { timeout: 60_000 }, () => {
     const { modules } = QRCode.create(options().verifyUrl, { errorCorrectionLevel: "M" });
     const expected = Array.from(modules.data, (value, index) => (value ? [`${Math.floor(index / modules.size)}/${index % modules.size}`] : [])).flat().sort();
     expect(dark).toEqual(expected);
+  });
+
+  it("can be followed to where it is verified", async () => {
+    expect((await read()).pages[0]!.links).toEqual([options().verifyUrl]);
   });
 
   it("always comes to the same bytes, whatever was made in between", async () => {

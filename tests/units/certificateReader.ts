@@ -18,6 +18,8 @@ export interface ReadPage {
   /** All of them, a space between. */
   words: string;
   structure: StructureNode;
+  /** Addresses that can be followed. */
+  links: string[];
   /** Rectangles that were filled as one surface, surface by surface. */
   surfaces: { x: number; y: number; width: number }[][];
 }
@@ -42,9 +44,10 @@ async function readPage(pdf: Awaited<ReturnType<typeof getDocument>["promise"]>,
   const [, , width, height] = page.view as [number, number, number, number];
   const { items } = await page.getTextContent();
   const read = items.flatMap((item) => ("str" in item && item.str.trim() !== "" ? [{ words: item.str, left: item.transform[4] as number, right: (item.transform[4] as number) + (item.transform[1] === 0 ? 0 : item.width), base: item.transform[5] as number }] : []));
+  const links = (await page.getAnnotations()).map(({ url }: { url?: string }) => url ?? "");
   const { fnArray, argsArray } = await page.getOperatorList();
   const surfaces = fnArray.flatMap((operator, index) => (operator === OPS.constructPath ? [rectanglesOf(argsArray[index] as [number[], number[]])] : []));
-  return { width, height, items: read, words: read.map(({ words }) => words).join(" "), structure: (await page.getStructTree()) as StructureNode, surfaces };
+  return { width, height, items: read, words: read.map(({ words }) => words).join(" "), structure: (await page.getStructTree()) as StructureNode, links, surfaces };
 }
 
 function rectanglesOf([operators, numbers]: [number[], number[]]): { x: number; y: number; width: number }[] {

@@ -3,6 +3,7 @@ import { digits, fixed, quantity, unitSymbol } from "@/lib/certificate/quantitie
 import { condense } from "@/lib/certificate/sections/condense";
 import { Fonts } from "@/lib/certificate/type/fonts";
 import { lineOf, runsOf } from "@/lib/certificate/type/runs";
+import type { Measurement } from "@/lib/records/issuedDocument";
 import { issued, SUPPLY_MAIN } from "./certificateReader";
 
 describe("words of a certificate", () => {
@@ -51,5 +52,14 @@ describe("the condensed working", () => {
     const readings = new Set(SUPPLY_MAIN.readings.lines.flat());
     const lost = result.working!.flatMap(({ inputs }) => Object.values(inputs)).filter(({ value, unit }) => !known.has(`${value} ${unit}`) && !readings.has(value));
     expect(lost).toEqual([]);
+  });
+
+  it("says at how many points an equation was used where there are several", () => {
+    const lines = SUPPLY_MAIN.readings.lines.map((line) => [...line]);
+    lines[0]![0] = -0.002;
+    lines[0]![1] = 1.9;
+    const { result } = issued({ ...SUPPLY_MAIN, readings: { ...SUPPLY_MAIN.readings, lines } as Measurement["readings"] });
+    const steps = condense(result.working!, result.uncertainty.budget).map(({ step }) => step).filter((step) => step.includes("point"));
+    expect(steps).toEqual(["Reading at line 1, point 1", "Velocity at 24 points", "Velocity at line 1, point 2"]);
   });
 });

@@ -1,10 +1,11 @@
 import { ACTION, INK, MUTED } from "../colours";
 import { stacked, type Block } from "../flow";
 import type { Context } from "../options";
-import type { Sheet } from "../sheet";
-import { CODE, FINE, SUBTITLE, TITLE } from "../styles";
+import type { Sheet, Style } from "../sheet";
+import { ascent, CODE, FINE, leading, SUBTITLE, TITLE } from "../styles";
 import { drawQrCode } from "../svg/qrCode";
 import { paragraph } from "../text";
+import { wrap } from "../type/wrap";
 
 export const TITLE_WORDS = "Duct traverse certificate";
 
@@ -26,7 +27,7 @@ export function head(context: Context): Block {
   ]);
   const verify = stacked([
     paragraph(sheet, "Verify this record", { face: "strong", size: 7.6, colour: INK }, VERIFY),
-    paragraph(sheet, options.verifyUrl, { ...CODE, size: 6.2, colour: ACTION }, VERIFY),
+    address(sheet, options.verifyUrl, VERIFY),
     { height: 2, draw: () => {} },
     paragraph(sheet, `Signed with key ${options.signingKeyId}`, { ...FINE, colour: MUTED }, VERIFY),
   ]);
@@ -39,6 +40,21 @@ export function head(context: Context): Block {
       verify.draw(right - QR - 10 - VERIFY, y + 4);
       sheet.tagged("Figure", () => drawQrCode(sheet, options.verifyUrl, right - QR, y, QR), { alt: `QR code of ${options.verifyUrl}`, bbox: [right - QR, y, right, y + QR] });
     },
+  };
+}
+
+/** An address as text that can also be followed. */
+function address(sheet: Sheet, url: string, width: number): Block {
+  const style: Style = { ...CODE, size: 6.2, colour: ACTION };
+  const lines = wrap(sheet, url, style, width);
+  const height = lines.length * leading(style);
+  return {
+    height,
+    draw: (x, y) =>
+      sheet.within("Link", () => {
+        sheet.content(() => lines.forEach((line, index) => sheet.write(line, x, y + ascent(style) + index * leading(style), style)));
+        sheet.link(x, y, width, height, url, "Verify this record");
+      }),
   };
 }
 

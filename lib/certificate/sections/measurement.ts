@@ -68,7 +68,7 @@ export function instrumentFacts({ document }: Context): Fact[] {
   const accuracy = [read?.accuracy?.percentOfReading !== undefined && `${read.accuracy.percentOfReading} % of reading`, read?.accuracy?.absolute && asGiven(read.accuracy.absolute)].filter(Boolean).join(" and ");
   const { gain = 1, offset = 0 } = read?.calibration ?? {};
   return [
-    ["Instrument", instrument ? instrument.name : "none named"],
+    ["Name", instrument ? instrument.name : "not named"],
     ...(instrument?.manufacturer || instrument?.model ? [["Make, model", [instrument.manufacturer, instrument.model].filter(Boolean).join(", ")] as const] : []),
     ...(instrument?.serialNumber ? [["Serial number", instrument.serialNumber] as const] : []),
     ...(read ? [["Principle", PRINCIPLES[read.principle]] as const] : []),

@@ -56,7 +56,8 @@ export function readingTable({ sheet, document }: Context, width: number): Readi
 }
 
 function readingsOf({ measurement: { readings }, result: { points, checks } }: IssuedDocument): Reading[][] {
-  const velocities = new Map(points.map(({ line, point, velocity }) => [`${line}/${point}`, fixed(velocity.value, velocity.unit === "m/s" ? 2 : 0)]));
+  const weight = (line: number, point: number): string => (readings.weights ? ` × ${readings.weights[line - 1]?.[point - 1]}` : "");
+  const velocities = new Map(points.map(({ line, point, velocity }) => [`${line}/${point}`, `${fixed(velocity.value, velocity.unit === "m/s" ? 2 : 0)}${weight(line, point)}`]));
   const suspected = new Set(checks.filter(({ code, passed }) => code === "possible_slip" && !passed).flatMap(({ at }) => at ?? []).map(({ line, point }) => `${line}/${point}`));
   return writtenLines(readings.lines).map((line, l) =>
     line.map((words, p) => {
@@ -69,7 +70,7 @@ function readingsOf({ measurement: { readings }, result: { points, checks } }: I
 function introduction({ measurement: { readings }, result: { points, checks } }: IssuedDocument): string {
   const kind = readings.kind === "velocity_pressure" ? "Velocity pressure" : "Velocity";
   const slips = checks.some(({ code, passed }) => code === "possible_slip" && !passed) ? " Framed: looks like a slip." : "";
-  return `${kind}, ${unitSymbol(readings.unit)}; below it the velocity, ${unitSymbol(points[0]?.velocity.unit ?? "")}.${slips}`;
+  return `${kind}, ${unitSymbol(readings.unit)}; below it the velocity, ${unitSymbol(points[0]?.velocity.unit ?? "")}${readings.weights ? ", × its weight" : ""}.${slips}`;
 }
 
 /** Each reading with as many decimals as the longest has, as on a sheet. */

@@ -37,7 +37,7 @@ export function placeWorking({ sheet, document }: Context, flow: Flow): void {
 
 function stepBlock(sheet: Sheet, { step, equation, value, given }: CondensedStep, width: number): Block {
   const name = `${step}: `;
-  const result = value ? `${equation} = ${quantity(value, DIGITS)}` : `${equation}, values below the readings`;
+  const result = value ? `${equation} = ${quantity(value, DIGITS)}` : step.startsWith("Velocity") ? `${equation}, values below the readings` : `${equation}, from the readings`;
   const inputs = given.map(([symbol, input]) => `${symbol} ${quantity(input, DIGITS)}`).join(", ");
   const lines = wrap(sheet, `${name}${result}${inputs ? `; ${inputs}` : ""}`, EQUATION, width);
   return {
