@@ -61,13 +61,13 @@ describe("the Bench", () => {
   });
 
   it("says what cannot be, in the engine's words", async () => {
-    await page.getByLabel("Measured").selectOption("outside");
+    await page.getByLabel("Measured", { exact: true }).selectOption("outside");
     await page.getByLabel("Lining").fill("9");
     await page.getByText("This cannot be").waitFor();
     await page.getByLabel("Lining").fill("x");
     await page.getByText("Write a number").waitFor();
     await page.getByLabel("Lining").fill("");
-    await page.getByLabel("Measured").selectOption("inside");
+    await page.getByLabel("Measured", { exact: true }).selectOption("inside");
     await page.getByRole("region", { name: "Result" }).waitFor();
   });
 

@@ -99,12 +99,15 @@ function onScreenChange(listener: () => void): () => void {
 function useFragment(sheet: BenchSheet, setSheet: (sheet: BenchSheet) => void): void {
   const [taken, setTaken] = useState(false);
   useEffect(() => {
-    const given = location.hash ? sheetFrom(location.hash) : null;
+    const take = (): void => setSheet(sheetFrom(location.hash) ?? BLANK_SHEET);
     // The address is known only in the browser, after the page from the server has been shown as it was.
     queueMicrotask(() => {
-      if (given) setSheet(given);
+      take();
       setTaken(true);
     });
+    // A link to another sheet, opened where the Bench is open already.
+    addEventListener("hashchange", take);
+    return () => removeEventListener("hashchange", take);
   }, [setSheet]);
   useEffect(() => {
     if (taken) history.replaceState(null, "", sheet === BLANK_SHEET ? location.pathname : fragmentOf(sheet));
