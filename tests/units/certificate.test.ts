@@ -59,6 +59,12 @@ describe("a certificate", { timeout: 60_000 }, () => {
     expect(cells).toEqual(written.flatMap((reading, index) => [reading, velocities[index]!]));
   });
 
+  it("never rounds a reading", async () => {
+    const fine: Measurement = { ...SUPPLY_MAIN, readings: { kind: "velocity_pressure", unit: "kPa", lines: [[0.012345, 0.0131, 0.0125]] }, instrument: undefined };
+    const written = (await read(issued(fine))).pages[0]!.items.map(({ words }) => words);
+    for (const reading of ["0.012345", "0.0131", "0.0125"]) expect(written).toContain(reading);
+  });
+
   it("says what an engineer files it for", async () => {
     const words = wordsOf(await read());
     const facts = [

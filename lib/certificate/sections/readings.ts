@@ -73,11 +73,16 @@ function introduction({ measurement: { readings }, result: { points, checks } }:
   return `${kind}, ${unitSymbol(readings.unit)}; below it the velocity, ${unitSymbol(points[0]?.velocity.unit ?? "")}${readings.weights ? ", × its weight" : ""}.${slips}`;
 }
 
-/** Each reading with as many decimals as the longest has, as on a sheet. */
+/** Each reading with as many decimals as the longest has, as on a sheet; one that this would round stays as it is. */
 function writtenLines(lines: readonly (readonly (number | null)[])[]): string[][] {
   const written = writeReadings(lines.flat());
   let next = 0;
-  return lines.map((line) => line.map(() => (written[next++] ?? "–").replace("-", "−")));
+  return lines.map((line) =>
+    line.map((reading) => {
+      const words = written[next++] ?? "–";
+      return (reading !== null && Number(words) !== reading ? String(reading) : words).replace("-", "−");
+    }),
+  );
 }
 
 /** A row of two lines: readings, and their velocities in small figures. */
