@@ -14,7 +14,7 @@ export default {
   compress: false,
   reactStrictMode: true,
   turbopack: { resolveAlias: parserAliases },
-  serverExternalPackages: ["knex", "mysql2", "pino", "@node-rs/argon2", "nodemailer", "rate-limiter-flexible"],
+  serverExternalPackages: ["knex", "mysql2", "pino", "@node-rs/argon2", "nodemailer", "rate-limiter-flexible", "pdfkit", "fontkit", "qrcode"],
   // `npm run check` and `npm test` check types; a start need not do it again.
   typescript: { ignoreBuildErrors: true },
   async headers() {
