@@ -55,6 +55,8 @@ export interface OperationDefinition<
   versioned?: boolean;
   /** Media type of the answer where it is not JSON. */
   media?: "image/svg+xml" | "application/pdf" | "text/csv" | "application/x-ndjson";
+  /** Media type of the body where it is not JSON; its schema is then that of the text. */
+  bodyMedia?: "text/csv";
   /** Largest accepted body; 1 MiB when left out. */
   maxBodyBytes?: number;
 }

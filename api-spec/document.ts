@@ -20,6 +20,8 @@ const problemSchema = z
           detail: z.string().describe("What is wrong here and what to do."),
           header: z.string().optional().describe("The header at fault, where it is not the body."),
           parameter: z.string().optional().describe("The query or path parameter at fault, where it is not the body."),
+          row: z.int().optional().describe("The row at fault, where the body is a CSV file."),
+          column: z.string().nullable().optional().describe("The column at fault, where the body is a CSV file; null for the row as a whole."),
         }),
       )
       .optional()
@@ -50,7 +52,7 @@ function headersOf(definition: OperationDefinition): z.ZodObject | undefined {
 /** All problems an operation can answer with. */
 export function problemsOf(definition: OperationDefinition): ProblemSlug[] {
   const slugs = [
-    ...(definition.body ? BODY_PROBLEMS : []),
+    ...(definition.body ? BODY_PROBLEMS.filter((slug) => slug !== "malformed-json" || !definition.bodyMedia) : []),
     ...(definition.query || definition.params ? (["invalid-request"] as const) : []),
     ...(takesIdempotencyKey(definition) ? (["idempotency-key-reused"] as const) : []),
     ...(definition.problems ?? []),
@@ -114,7 +116,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
       ...(definition.query && { query: definition.query as z.ZodObject }),
       ...(headersOf(definition) && { headers: headersOf(definition)! }),
       ...(definition.body && {
-        body: { required: true, content: { "application/json": { schema: definition.body, ...(examples && { examples: examples.request }) } } },
+        body: { required: true, content: { [definition.bodyMedia ?? "application/json"]: { schema: definition.body, ...(examples && { examples: examples.request }) } } },
       }),
     },
     responses: {

@@ -153,6 +153,12 @@ export const PROBLEMS = {
     meaning: "The body is JSON, but fields are missing, unknown, of the wrong type, in a unit that does not belong, or out of bounds. Each is listed in errors.",
     remedy: "Mend every field listed in errors; each pointer is a JSON Pointer (RFC 6901) into the body.",
   },
+  "import-has-faults": {
+    status: 422,
+    title: "The file has faults, so nothing was imported",
+    meaning: "Rows or columns of the CSV file cannot be imported as they are. An import is done whole or not at all.",
+    remedy: "Mend every row and column listed in errors; a dry run tells whether all is well.",
+  },
   "idempotency-key-reused": {
     status: 422,
     title: "The Idempotency-Key was used for another request",

@@ -11,6 +11,7 @@ import { systemBalance } from "./calculations/systemBalance";
 import { traversePlan } from "./calculations/traversePlan";
 import * as attachments from "./records/attachments";
 import * as events from "./records/events";
+import * as imports from "./records/imports";
 import * as instruments from "./records/instruments";
 import * as projects from "./records/projects";
 import * as traverses from "./records/traverses";
@@ -31,6 +32,7 @@ export const OPERATIONS: OperationDefinition[] = [
   webhooks.rotateWebhookSecret, webhooks.listDeliveries, webhooks.redeliver, events.listEvents, events.readEvent,
   attachments.createAttachment, attachments.listAttachments, attachments.readAttachment, attachments.changeAttachment, attachments.deleteAttachment,
   attachments.readAttachmentContent,
+  imports.createImport, imports.listImports, imports.readImport,
   readUsage,
 ];
 
@@ -41,6 +43,7 @@ export const TAGS: Record<string, string> = {
   Instruments: "The firm's instruments and their calibrations.",
   Traverses: "Stored traverses: drafts that can be changed, and issued records that are signed and stay.",
   Attachments: "Photographs and documents of a traverse: part of a draft, and kept with what was issued.",
+  "Imports and exports": "Many traverses at once, from a CSV file and to one.",
   Verification: "For anyone who holds a record: no key is needed.",
   "Events and webhooks": "What happened to records, and endpoints that are told of it.",
   Usage: "What the organisation's keys were used for.",

@@ -158,6 +158,21 @@ export async function up(knex: Knex): Promise<void> {
     table.index(["created_at"]);
   });
 
+  await knex.schema.createTable("imports", (table) => {
+    identifier(table, "id").primary();
+    realm(table);
+    table.string("name", 200).nullable();
+    // Of the file and its options. Null once a file was imported again after all its drafts had been deleted.
+    table.specificType("sha256", "BINARY(32)").nullable();
+    table.integer("row_count").unsigned().notNullable();
+    table.integer("traverse_count").unsigned().notNullable();
+    // As it was answered.
+    table.json("report").notNullable();
+    moment(table, "created_at").notNullable();
+    table.unique(["organisation_id", "environment", "sha256"]);
+    table.index(["organisation_id", "environment", "id"]);
+  });
+
   for (const trigger of IMMUTABLE) await knex.raw(trigger);
 }
 
@@ -185,7 +200,7 @@ const IMMUTABLE = [
 ];
 
 export async function down(knex: Knex): Promise<void> {
-  for (const table of ["idempotency_keys", "attachments", "issued_documents", "signing_keys", "traverse_history", "traverses", "calibrations", "instruments", "projects"]) {
+  for (const table of ["imports", "idempotency_keys", "attachments", "issued_documents", "signing_keys", "traverse_history", "traverses", "calibrations", "instruments", "projects"]) {
     await knex.schema.dropTable(table);
   }
 }

@@ -3,7 +3,7 @@ import type { OperationDefinition } from "@/api-spec/define";
 import type { Key } from "@/lib/keys/keyDirectory";
 import { problemResponse } from "@/lib/problems/problem";
 import { admit, beginPassage, endPassage, jsonAnswer, passageHeaders, svgAnswer, toProblem, withHeaders, type Passage } from "./passage";
-import { readJson } from "./requestBody";
+import { readBody } from "./requestBody";
 import { validate } from "./validation";
 
 /** What an operation is given: everything validated, and the key it was called with. */
@@ -28,7 +28,7 @@ export async function readCall<Body extends z.ZodType, Answer extends z.ZodType,
   context: Context,
   passage: Passage,
 ): Promise<Call<z.output<Body>, z.output<Query>, z.output<Params>>> {
-  if (definition.body) passage.sent = await readJson(request, definition.maxBodyBytes);
+  if (definition.body) passage.sent = await readBody(request, definition);
   return {
     input: definition.body && validate(definition.body, passage.sent),
     query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),

@@ -7,7 +7,7 @@ import { cookieOf } from "./cookies";
 import type { Handler } from "./operation";
 import { requireSameOrigin } from "./origin";
 import { toProblem } from "./passage";
-import { readJson } from "./requestBody";
+import { readBody } from "./requestBody";
 import { validate } from "./validation";
 
 /** Who may call: anyone, somebody signed in, a member with at least this role, or a platform administrator. */
@@ -21,6 +21,8 @@ type Caller<A extends Access> = A extends "anyone" ? SignedIn | null : A extends
 interface PortalDefinition<A extends Access, Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType> {
   access: A;
   body?: Body;
+  bodyMedia?: "text/csv";
+  maxBodyBytes?: number;
   params?: Params;
   query?: Query;
   /** Status of a successful answer; 200 when left out. */
@@ -58,7 +60,7 @@ export function portalOperation<A extends Access, Body extends z.ZodType, Params
       requireSameOrigin(request);
       const call = {
         caller: await callerFor(definition.access, request),
-        input: definition.body && validate(definition.body, await readJson(request)),
+        input: definition.body && validate(definition.body, await readBody(request, definition)),
         params: definition.params && validate(definition.params, await context.params, "path"),
         query: definition.query && validate(definition.query, Object.fromEntries(new URL(request.url).searchParams), "query"),
         userAgent: request.headers.get("user-agent") ?? "",

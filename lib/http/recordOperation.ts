@@ -23,14 +23,18 @@ export interface RecordResult<Answer> {
 
 const MOST_TRIES = 4;
 
+/** What may be done before the transaction begins, so that what takes long holds no connection and no lock. */
+type Prepare<Body, Query, Params, Prepared> = (call: RecordCall<Body, Query, Params>) => Promise<Prepared>;
+
 /**
  * Makes the handler of an operation on records. A change is one transaction, committed before it is answered; with an
  * Idempotency-Key it is done once, however often it is sent.
  */
-export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType, Query extends z.ZodType, Params extends z.ZodType>(
+export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType, Query extends z.ZodType, Params extends z.ZodType, Prepared = undefined>(
   definition: OperationDefinition<Body, Answer, Query, Params>,
   /** An operation whose answer is not JSON, such as a drawing, gives a Response. */
-  run: (call: RecordCall<z.output<Body>, z.output<Query>, z.output<Params>>) => Promise<RecordResult<z.input<Answer>> | Response>,
+  run: (call: RecordCall<z.output<Body>, z.output<Query>, z.output<Params>>, prepared: Prepared) => Promise<RecordResult<z.input<Answer>> | Response>,
+  prepare?: Prepare<z.output<Body>, z.output<Query>, z.output<Params>, Prepared>,
 ): Handler {
   return async (request, context) => {
     const passage = beginPassage();
@@ -39,8 +43,9 @@ export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType
       const call = await readCall(definition, request, context, passage);
       const { id: apiKeyId, organisationId, environment } = passage.key!;
       const realm = { organisationId, environment };
-      const requireMatch = matcher(request);
-      const runWith = (db: Knex) => run({ ...call, db, realm, by: { apiKeyId }, requireMatch });
+      const recordCall = { ...call, db: database(), realm, by: { apiKeyId }, requireMatch: matcher(request) };
+      const prepared = (await prepare?.(recordCall)) as Prepared;
+      const runWith = (db: Knex) => run({ ...recordCall, db }, prepared);
       const response = definition.method === "get" ? read(request, definition, await runWith(database())) : asResponse(await once(request, realm, call.input, async (db) => kept(await runWith(db), definition)));
       endPassage(definition, passage, response.status, null);
       return withHeaders(response, passage);
@@ -51,6 +56,11 @@ export function recordOperation<Body extends z.ZodType, Answer extends z.ZodType
       return withHeaders(response, passage);
     }
   };
+}
+
+function pathAndQuery(request: Request): string {
+  const { pathname, search } = new URL(request.url);
+  return pathname + search;
 }
 
 const asResponse = ({ status, text, headers }: KeptAnswer): Response => new Response(status === 204 ? null : text, { status, headers });
@@ -65,7 +75,7 @@ function read(request: Request, definition: OperationDefinition, result: RecordR
 async function once(request: Request, realm: RecordContext["realm"], input: unknown, work: (db: Knex) => Promise<KeptAnswer>): Promise<KeptAnswer> {
   const key = request.method === "POST" ? idempotencyKeyOf(request) : null;
   if (key === null) return inTransaction(work);
-  const fingerprint = fingerprintOf(request.method, new URL(request.url).pathname, input);
+  const fingerprint = fingerprintOf(request.method, pathAndQuery(request), input);
   return inTransaction(async (db) => {
     const before = await claimIdempotencyKey(db, realm, key, fingerprint);
     if (before) return before;

@@ -9,6 +9,9 @@ export interface ProblemFault {
   /** The header or query parameter at fault, where it is not the body. */
   header?: string;
   parameter?: string;
+  /** The row and column at fault, where the body is a CSV file. */
+  row?: number;
+  column?: string | null;
 }
 
 interface ProblemDetails {

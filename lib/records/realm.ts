@@ -7,7 +7,7 @@ export interface Realm {
   environment: Environment;
 }
 
-export type RecordTable = "projects" | "instruments" | "calibrations" | "traverses" | "traverse_history" | "attachments" | "events" | "webhook_endpoints" | "deliveries" | "idempotency_keys";
+export type RecordTable = "projects" | "instruments" | "calibrations" | "traverses" | "traverse_history" | "attachments" | "events" | "webhook_endpoints" | "deliveries" | "idempotency_keys" | "imports";
 
 /** The columns that put a row into a realm. */
 export const realmColumns = ({ organisationId, environment }: Realm): { organisation_id: string; environment: Environment } => ({ organisation_id: organisationId, environment });
