@@ -10,6 +10,6 @@ export function Thumbnail({ item: { id, airflow }, className = "w-24" }: { item:
       </span>
     );
   }
-  // A drawing of a few kilobytes made on demand: there is nothing for an image optimiser to do.
-  return <img src={`/api/portal/records/${id}/thumbnail.svg`} alt="" loading="lazy" width={96} height={72} className={`aspect-4/3 h-auto rounded-control bg-white ${className}`} />;
+  // As an image of its own it has the colours of paper, whatever the page's are.
+  return <img src={`/api/portal/records/${id}/thumbnail.svg`} alt="" loading="lazy" width={96} height={72} className={`aspect-4/3 h-auto rounded-control bg-[#fff] p-0.5 ${className}`} />;
 }

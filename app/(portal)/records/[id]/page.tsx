@@ -31,6 +31,9 @@ import { RecordNotices } from "./RecordNotices";
 
 export const metadata: Metadata = { title: "Traverse" };
 
+/** Drawing units across a telephone. */
+const NARROW = 360;
+
 export default async function RecordPage({ params }: { params: Promise<{ id: string }> }) {
   const member = await requireSignedIn();
   const { id } = await params;
@@ -54,7 +57,7 @@ export default async function RecordPage({ params }: { params: Promise<{ id: str
       <div className="grid grid-cols-[minmax(0,1fr)] gap-8">
         <RecordNotices traverse={traverse} />
         {result && <ResultHead result={result} />}
-        {figure && <Figure svg={figure} />}
+        {figure && <Figure {...figure} />}
         {result && <Result result={result} />}
         <section aria-labelledby="facts">
           <SectionHead id="facts">What was measured</SectionHead>
@@ -115,6 +118,6 @@ function factsOf({ technician, takenAt, issuedAt, instrument, calibrationWaiver,
 }
 
 /** The record's drawing; null where there is nothing to draw yet. */
-function drawn(row: TraverseRow): string | null {
-  return row.input.duct && (row.result || row.input.layout) ? figureOf(row) : null;
+function drawn(row: TraverseRow): { svg: string; narrow: string } | null {
+  return row.input.duct && (row.result || row.input.layout) ? { svg: figureOf(row), narrow: figureOf(row, "page", NARROW) } : null;
 }

@@ -8,6 +8,7 @@ import { UncertaintyBars } from "@/app/_components/figures/UncertaintyBars";
 import { ChecksList } from "@/app/_components/data/ChecksList";
 import { WorkingTable } from "@/app/_components/data/WorkingTable";
 import { resultFigure } from "@/lib/airflow/figure/resultFigure";
+import type { IssuedDocument } from "@/lib/records/issuedDocument";
 import { verifyRecord } from "@/lib/records/verifyRecord";
 import { CheckItYourself } from "./CheckItYourself";
 import { Facts } from "./Facts";
@@ -46,7 +47,7 @@ export default async function VerifyPage({ params }: Props) {
         <>
           <ResultHead result={document.result} />
           <section aria-label="Figure">
-            <Figure svg={resultFigure({ ...document.measurement, result: document.result, title: [document.system, document.location].filter(Boolean).join(", ") || "Traverse" })} />
+            <Figure svg={drawn(document)} narrow={drawn(document, NARROW)} />
           </section>
           <Facts document={document} />
           <section aria-labelledby="checks">
@@ -67,3 +68,9 @@ export default async function VerifyPage({ params }: Props) {
     </article>
   );
 }
+
+/** Drawing units across a telephone. */
+const NARROW = 360;
+
+const drawn = ({ measurement, result, system, location }: IssuedDocument, width?: number): string =>
+  resultFigure({ ...measurement, result, title: [system, location].filter(Boolean).join(", ") || "Traverse", width });
