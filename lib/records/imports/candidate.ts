@@ -20,6 +20,8 @@ export interface Candidate {
   fields: Record<string, unknown>;
   /** Which cell each of them came from, by its path. */
   cells: Map<string, Place>;
+  /** Columns of its first row whose cell is filled, but cannot be read. */
+  unread: Set<string>;
   faults: ImportFault[];
 }
 
@@ -29,13 +31,17 @@ export const cellAt = ({ cells }: FileRow, place: number | undefined): string =>
 
 /** Begins a traverse with what its first row describes. */
 export function candidateOf(row: FileRow, reference: string | null, headings: Headings, decimalComma: boolean): Candidate {
-  const candidate: Candidate = { row: row.number, reference, fields: {}, cells: new Map(), faults: [] };
+  const candidate: Candidate = { row: row.number, reference, fields: {}, cells: new Map(), unread: new Set(), faults: [] };
   for (const column of TRAVERSE_COLUMNS) {
     const cell = cellAt(row, headings.places.get(column.name));
     if (cell === "" || !column.at) continue;
     const value = valueOf(row, cell, column, headings, decimalComma);
     if ("value" in value) put(candidate, column.at, value.value, { row: row.number, column: column.name });
-    else candidate.faults.push({ row: row.number, ...value });
+    else {
+      candidate.unread.add(column.name);
+      // Several quantities may lack the same unit.
+      if (!candidate.faults.some(({ column: told }) => told === value.column)) candidate.faults.push({ row: row.number, ...value });
+    }
   }
   return candidate;
 }

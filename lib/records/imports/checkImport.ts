@@ -62,7 +62,8 @@ async function checkTraverse(candidate: Candidate, references: References): Prom
   const parsed = traverseFields.safeParse(given);
   const add = (fault: ImportFault): void => {
     // What a cell could not be read as, is missing from the fields as well; it is told of once.
-    if (!candidate.faults.some((known) => known.row === fault.row && known.column === fault.column)) candidate.faults.push(fault);
+    const told = fault.row === row && candidate.unread.has(fault.column ?? "");
+    if (!told && !candidate.faults.some((known) => known.row === fault.row && known.column === fault.column)) candidate.faults.push(fault);
   };
   if (!parsed.success) {
     for (const { path, code, detail } of parsed.error.issues.flatMap((issue) => fieldFaults(issue, given))) add(faultAt(candidate, path, code, detail));
