@@ -96,7 +96,7 @@ describe("records in the portal", () => {
     await page.getByLabel("Records of").selectOption("production");
     await page.getByText("No traverse is like this").waitFor();
     await page.goto(at(`/records/${issued}`));
-    await page.getByText(/nothing here/i).first().waitFor();
+    await page.getByText("Page not found").first().waitFor();
     await page.goto(at("/records"));
     await page.getByLabel("Records of").selectOption("sandbox");
     await page.getByRole("table", { name: "Traverses" }).waitFor();
