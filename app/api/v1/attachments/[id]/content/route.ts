@@ -11,11 +11,12 @@ const POLICY = "sandbox; default-src 'none'";
 export const GET = answering(definition, async (request, params) => {
   const { id } = validate(definition.params!, params, "path");
   const link = validate(definition.query!, Object.fromEntries(new URL(request.url).searchParams), "query");
-  const { row, body, bytes } = await contentByLink(id, link);
-  return new Response(body as ReadableStream<Uint8Array>, {
+  const { row, body } = await contentByLink(id, link);
+  // Next.js answers HEAD with this too, and leaves the body as it is: unread, with its file open.
+  if (request.method === "HEAD") await body.cancel();
+  return new Response(request.method === "HEAD" ? null : (body as ReadableStream<Uint8Array>), {
     headers: {
       "Content-Type": row.media_type,
-      "Content-Length": String(bytes),
       "Content-Disposition": inlineDisposition(row.file_name),
       "Cache-Control": "private, max-age=300",
       "Content-Security-Policy": POLICY,
