@@ -7,23 +7,26 @@ import type { Handler } from "./operation";
 import { portalOperation, type Member } from "./portalOperation";
 import { inTransaction } from "./recordOperation";
 
-interface Definition<Body extends z.ZodType, Params extends z.ZodType> {
+interface Definition<Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType> {
   access: "viewer" | "developer" | "owner";
   body?: Body;
+  bodyMedia?: "text/csv";
+  maxBodyBytes?: number;
   params?: Params;
+  query?: Query;
   status?: 200 | 201 | 204;
 }
 
 /** A change to records by a person in the portal: in the environment they see, in one transaction, under their name. */
-export function portalRecordOperation<Body extends z.ZodType, Params extends z.ZodType>(
-  definition: Definition<Body, Params>,
-  run: (call: RecordContext & { caller: Member; input: z.output<Body>; params: z.output<Params> }) => Promise<unknown>,
+export function portalRecordOperation<Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType = z.ZodType>(
+  definition: Definition<Body, Params, Query>,
+  run: (call: RecordContext & { caller: Member; input: z.output<Body>; params: z.output<Params>; query: z.output<Query> }) => Promise<unknown>,
 ): Handler {
   return (request, context) => {
     const environment = environmentFrom(cookieOf(request, ENVIRONMENT_COOKIE));
-    const handler = portalOperation(definition, async ({ caller, input, params }) => {
+    const handler = portalOperation(definition, async ({ caller, input, params, query }) => {
       const realm = { organisationId: caller.organisation.id, environment };
-      return { body: await inTransaction((db) => run({ db, realm, by: { userId: caller.userId }, caller, input, params })) };
+      return { body: await inTransaction((db) => run({ db, realm, by: { userId: caller.userId }, caller, input, params, query })) };
     });
     return handler(request, context);
   };
