@@ -19,6 +19,8 @@ export interface Example<Body> {
   body: Body;
 }
 
+type AnswerMedia = "image/svg+xml" | "application/pdf" | "text/csv" | "application/x-ndjson";
+
 /**
  * The one definition of an operation. Validation, types, the OpenAPI document, the reference page and the
  * examples' tests all come from it.
@@ -53,8 +55,8 @@ export interface OperationDefinition<
   figure?: string;
   /** Reads and changes a record that has a version: the answer has an ETag, and a change takes If-Match. */
   versioned?: boolean;
-  /** Media type of the answer where it is not JSON. */
-  media?: "image/svg+xml" | "application/pdf" | "text/csv" | "application/x-ndjson";
+  /** Media type of the answer where it is not JSON; several where the request says which. */
+  media?: AnswerMedia | AnswerMedia[];
   /** Media type of the body where it is not JSON; its schema is then that of the text. */
   bodyMedia?: "text/csv";
   /** Largest accepted body; 1 MiB when left out. */

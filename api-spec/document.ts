@@ -131,7 +131,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
           }),
         },
         ...(status !== "204" && {
-          content: definition.media ? { [definition.media]: { schema: { type: "string" as const } } } : {
+          content: definition.media ? Object.fromEntries([definition.media].flat().map((media) => [media, { schema: { type: "string" as const } }])) : {
             "application/json": { schema: definition.answer, ...(examples && { examples: examples.answer }) },
             ...(definition.figure && { "image/svg+xml": { schema: { type: "string" as const, description: definition.figure } } }),
           },

@@ -11,6 +11,7 @@ import { systemBalance } from "./calculations/systemBalance";
 import { traversePlan } from "./calculations/traversePlan";
 import * as attachments from "./records/attachments";
 import * as events from "./records/events";
+import { exportTraverses } from "./records/exports";
 import * as imports from "./records/imports";
 import * as instruments from "./records/instruments";
 import * as projects from "./records/projects";
@@ -32,7 +33,7 @@ export const OPERATIONS: OperationDefinition[] = [
   webhooks.rotateWebhookSecret, webhooks.listDeliveries, webhooks.redeliver, events.listEvents, events.readEvent,
   attachments.createAttachment, attachments.listAttachments, attachments.readAttachment, attachments.changeAttachment, attachments.deleteAttachment,
   attachments.readAttachmentContent,
-  imports.createImport, imports.listImports, imports.readImport,
+  imports.createImport, imports.listImports, imports.readImport, exportTraverses,
   readUsage,
 ];
 

@@ -1,5 +1,6 @@
 import { database } from "@/db/connection";
 import { log } from "@/lib/runtime/log";
+import { sweepObjects } from "@/lib/records/attachments/objects";
 import { onShutdown } from "@/lib/runtime/shutdown";
 import { calibrationDueEvents } from "@/lib/webhooks/calibrationDue";
 
@@ -26,11 +27,12 @@ export async function deleteOutdated(now: number): Promise<void> {
   }
 }
 
-/** Deletes what is outdated and tells of calibrations that are due, every hour, for as long as the process runs. */
+/** Deletes what is outdated, sweeps up files and tells of calibrations that are due, every hour, for as long as the process runs. */
 export function startHousekeeping(): void {
   const timer = setInterval(() => {
     void deleteOutdated(Date.now()).catch((error: unknown) => log().warn({ err: error }, "outdated rows could not be deleted"));
     void calibrationDueEvents().catch((error: unknown) => log().warn({ err: error }, "calibrations that are due could not be told of"));
+    void sweepObjects(Date.now()).catch((error: unknown) => log().warn({ err: error }, "files that nothing refers to could not be swept up"));
   }, HOUR_MS).unref();
   onShutdown("housekeeping", async () => clearInterval(timer));
 }

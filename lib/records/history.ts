@@ -7,17 +7,20 @@ export type HistoryAction =
   | "attachment_added" | "attachment_changed" | "attachment_deleted";
 
 /** Writes down what was done to a traverse, by whom, in the transaction that does it. */
-export async function addHistory({ db, realm, by }: RecordContext, traverseId: string, action: HistoryAction, details: Record<string, unknown> | null = null): Promise<void> {
-  await addRecord(db, "traverse_history", realm, {
-    id: newId("his"),
-    traverse_id: traverseId,
-    action,
-    api_key_id: by.apiKeyId ?? null,
-    user_id: by.userId ?? null,
-    details: details && JSON.stringify(details),
-    at: new Date(),
-  });
+export async function addHistory(context: RecordContext, traverseId: string, action: HistoryAction, details: Record<string, unknown> | null = null): Promise<void> {
+  await addRecord(context.db, "traverse_history", context.realm, historyRow(context, traverseId, action, details));
 }
+
+/** The row of the same, for when many are written at once. */
+export const historyRow = ({ by }: Pick<RecordContext, "by">, traverseId: string, action: HistoryAction, details: Record<string, unknown> | null = null) => ({
+  id: newId("his"),
+  traverse_id: traverseId,
+  action,
+  api_key_id: by.apiKeyId ?? null,
+  user_id: by.userId ?? null,
+  details: details && JSON.stringify(details),
+  at: new Date(),
+});
 
 interface HistoryRow {
   id: string;

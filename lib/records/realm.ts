@@ -19,5 +19,5 @@ export const realmColumns = ({ organisationId, environment }: Realm): { organisa
 export const recordsOf = <Row extends object>(db: Knex, table: RecordTable, realm: Realm): Knex.QueryBuilder<Row, Row[]> =>
   db<Row>(table).where(Object.fromEntries(Object.entries(realmColumns(realm)).map(([column, value]) => [`${table}.${column}`, value]))) as Knex.QueryBuilder<Row, Row[]>;
 
-/** Adds a row to a realm. */
-export const addRecord = (db: Knex, table: RecordTable, realm: Realm, row: Record<string, unknown>): Promise<unknown> => db(table).insert({ ...realmColumns(realm), ...row });
+/** Adds a row, or several in one statement, to a realm. */
+export const addRecord = (db: Knex, table: RecordTable, realm: Realm, ...rows: Record<string, unknown>[]): Promise<unknown> => db(table).insert(rows.map((row) => ({ ...realmColumns(realm), ...row })));

@@ -13,6 +13,7 @@ export default async function startRunningApp(): Promise<() => Promise<void>> {
   rmSync(folder, { recursive: true, force: true });
   const database = await startPrivateServer(folder);
   await prepareDatabase(database.url);
+  process.env.OBJECTS_FOLDER = path.join(folder, "objects");
   const port = await freePort();
   const url = `http://localhost:${port}`;
   const app = await startApp({

@@ -6,9 +6,9 @@ import { traverseFields } from "@/api-spec/records/traverseShapes";
 import { AirflowInputError } from "@/lib/airflow/errors";
 import { Problem } from "@/lib/problems/problem";
 import type { RecordContext } from "../context";
-import { projects } from "../projects";
-import { datedInstrument, type DatedInstrument } from "../traverses/datedInstrument";
-import { measure } from "../traverses/measure";
+import { measure, type Measured } from "../traverses/measure";
+import { referencesOf, type References } from "../traverses/references";
+import type { TraverseInput } from "../traverses/row";
 import { faultAt, type Candidate } from "./candidate";
 import type { ImportFault, ImportReport } from "./fault";
 import { fieldFaults } from "./fieldFaults";
@@ -32,7 +32,7 @@ const TURN_MS = 10;
 /** Looks a whole file through and changes nothing. */
 export async function checkImport(context: Reading, text: string, { mode, projectId, decimalComma, name }: ImportOptions): Promise<CheckedImport> {
   const references = referencesOf(context);
-  if (projectId && !(await references.hasProject(projectId))) throw noSuchProject();
+  if (projectId) await asParameter("projectId", references.requireProject(projectId));
   const { traverses: candidates, form, delimiter, rows, faults } = await readTraverses(text, decimalComma);
   const report: ImportReport = { id: null, mode, repeated: false, name: name ?? null, form, delimiter, rows, traverses: [], faults, faultCount: 0, createdAt: null };
   const traverses: TraverseFields[] = [];
@@ -69,54 +69,36 @@ async function checkTraverse(candidate: Candidate, references: References): Prom
     for (const { path, code, detail } of parsed.error.issues.flatMap((issue) => fieldFaults(issue, given))) add(faultAt(candidate, path, code, detail));
     return { told };
   }
-  const { projectId, instrumentId, system: _s, takenAt, ...input } = parsed.data;
+  const { projectId, instrumentId = null, system: _s, takenAt, ...input } = parsed.data;
   told.readings = input.readings?.lines.flat().filter((reading) => reading !== null).length ?? 0;
-  if (!(await references.hasProject(projectId))) add(faultAt(candidate, ["projectId"], "not_found", "There is no such project in this organisation and environment."));
-  const instrument = instrumentId ? await references.instrument(instrumentId, takenAt ?? null) : null;
-  if (instrumentId && !instrument) add(faultAt(candidate, ["instrumentId"], "not_found", "There is no such instrument in this organisation and environment."));
-  try {
-    const { result, percent_of_design: percentOfDesign } = measure(input as Parameters<typeof measure>[0], instrument);
-    if (result) {
-      const failedChecks = result.checks.filter(({ passed }) => !passed).map(({ code, severity, detail }) => ({ code, severity, detail }));
-      Object.assign(told, { airflow: result.airflow.actual, percentOfDesign, verdict: result.design?.verdict ?? null, failedChecks });
-    }
-  } catch (error) {
-    if (!(error instanceof AirflowInputError)) throw error;
-    for (const { path, code, detail } of error.faults) add(faultAt(candidate, path, code, detail));
-  }
+  await tolerating(() => references.requireProject(projectId), candidate, add);
+  const instrument = await tolerating(() => references.instrument(instrumentId, takenAt ? new Date(takenAt) : null), candidate, add);
+  await tolerating(async () => Object.assign(told, outcomeOf(measure(input as TraverseInput, instrument ?? null))), candidate, add);
   return { told, fields: parsed.data };
 }
 
-/** What the rows of a file refer to, each looked up once. */
-interface References {
-  hasProject(id: string): Promise<boolean>;
-  /** The instrument as it was on the day, or null where there is none. */
-  instrument(id: string, takenAt: string | null): Promise<DatedInstrument | null>;
+function outcomeOf({ result, percent_of_design: percentOfDesign }: Measured): Partial<Told> {
+  if (!result) return {};
+  const failedChecks = result.checks.filter(({ passed }) => !passed).map(({ code, severity, detail }) => ({ code, severity, detail }));
+  return { airflow: result.airflow.actual, percentOfDesign, verdict: result.design?.verdict ?? null, failedChecks };
 }
 
-function referencesOf(context: Reading): References {
-  const once = <Value>(look: (key: string) => Promise<Value>) => {
-    const known = new Map<string, Promise<Value>>();
-    return (key: string): Promise<Value> => {
-      const found = known.get(key) ?? look(key);
-      known.set(key, found);
-      return found;
-    };
-  };
-  const hasProject = once(async (id) => (await projects(context).where("projects.id", id).first("projects.id")) !== undefined);
-  const dated = once(async (key) => {
-    const [id, day] = key.split(" ") as [string, string];
-    try {
-      return await datedInstrument(context, id, day ? new Date(day) : null);
-    } catch (error) {
-      if (error instanceof Problem) return null;
-      throw error;
-    }
+/** Does something with a traverse; what is refused of it, is told of at its cell. */
+async function tolerating<Result>(work: () => Promise<Result>, candidate: Candidate, tell: (fault: ImportFault) => void): Promise<Result | undefined> {
+  try {
+    return await work();
+  } catch (error) {
+    if (error instanceof AirflowInputError) for (const { path, code, detail } of error.faults) tell(faultAt(candidate, path, code, detail));
+    else if (error instanceof Problem) for (const { pointer, code, detail } of error.details.errors ?? []) tell(faultAt(candidate, pointer.split("/").slice(1), code, detail));
+    else throw error;
+    return undefined;
+  }
+}
+
+/** Says of a reference that it was named in the query. */
+async function asParameter(parameter: string, looked: Promise<void>): Promise<void> {
+  await looked.catch((error: unknown) => {
+    if (!(error instanceof Problem)) throw error;
+    throw new Problem(error.slug, { detail: error.message, errors: error.details.errors?.map((fault) => ({ ...fault, pointer: "", parameter })) });
   });
-  return { hasProject, instrument: (id, takenAt) => dated(`${id} ${takenAt ? new Date(takenAt).toISOString().slice(0, 10) : ""}`) };
-}
-
-function noSuchProject(): Problem {
-  const detail = "There is no such project in this organisation and environment.";
-  return new Problem("invalid-request", { detail: `At projectId: ${detail}`, errors: [{ pointer: "", parameter: "projectId", code: "not_found", detail }] });
 }

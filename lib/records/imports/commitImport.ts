@@ -2,7 +2,7 @@ import { newId } from "@/lib/ids/newId";
 import { Problem } from "@/lib/problems/problem";
 import type { RecordContext } from "../context";
 import { addRecord, recordsOf } from "../realm";
-import { createTraverse } from "../traverses/drafts";
+import { createTraverses } from "../traverses/drafts";
 import { traverses } from "../traverses/row";
 import type { CheckedImport } from "./checkImport";
 import type { ImportReport } from "./fault";
@@ -24,11 +24,9 @@ export async function commitImport(context: RecordContext, checked: CheckedImpor
     if (meanwhile) return { ...meanwhile, repeated: true };
     throw error;
   }
-  const report: ImportReport = { ...checked.report, id, mode: "commit", createdAt: createdAt.toISOString(), traverses: [] };
-  for (const [index, fields] of checked.traverses.entries()) {
-    const { id: traverseId } = await createTraverse(context, fields);
-    report.traverses.push({ ...checked.report.traverses[index]!, id: traverseId });
-  }
+  const report: ImportReport = { ...checked.report, id, mode: "commit", createdAt: createdAt.toISOString() };
+  const ids = await createTraverses(context, checked.traverses);
+  report.traverses = checked.report.traverses.map((traverse, index) => ({ ...traverse, id: ids[index]! }));
   await recordsOf(context.db, "imports", context.realm).where("imports.id", id).update({ report: JSON.stringify(report) });
   return report;
 }

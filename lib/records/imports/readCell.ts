@@ -14,7 +14,7 @@ const wrong = (code: string, detail: string): CellValue => ({ code, detail });
 export function readNumber(cell: string, decimalComma: boolean): CellValue {
   const plain = cell.replace("−", "-");
   const text = decimalComma ? plain.replace(",", ".") : plain;
-  if (NUMBER.test(text) && !(decimalComma && plain.includes("."))) return { value: Number(text) };
+  if (NUMBER.test(text) && Number.isFinite(Number(text)) && !(decimalComma && plain.includes("."))) return { value: Number(text) };
   if (decimalComma && /\d\.\d/.test(plain)) return wrong("not_a_number", `"${shown(cell)}" has a point, but the numbers were declared to have a decimal comma. Write 0,041 and no separator of thousands.`);
   if (!decimalComma && /\d,\d/.test(plain)) return wrong("not_a_number", `"${shown(cell)}" has a comma. If it is a decimal comma, send decimalComma=true; a separator of thousands has to go.`);
   return wrong("not_a_number", `"${shown(cell)}" is not a number. Write the number alone; its unit has a column of its own.`);
