@@ -19,7 +19,7 @@ export interface Example<Body> {
   body: Body;
 }
 
-type AnswerMedia = "image/svg+xml" | "application/pdf" | "text/csv" | "application/x-ndjson";
+type AnswerMedia = "image/svg+xml" | "image/jpeg" | "image/png" | "application/pdf" | "text/csv" | "application/x-ndjson";
 
 /**
  * The one definition of an operation. Validation, types, the OpenAPI document, the reference page and the
@@ -56,9 +56,11 @@ export interface OperationDefinition<
   /** Reads and changes a record that has a version: the answer has an ETag, and a change takes If-Match. */
   versioned?: boolean;
   /** Media type of the answer where it is not JSON; several where the request says which. */
-  media?: AnswerMedia | AnswerMedia[];
+  media?: AnswerMedia | readonly AnswerMedia[];
   /** Media type of the body where it is not JSON; its schema is then that of the text. */
   bodyMedia?: "text/csv";
+  /** The parts of the form, where the body is one with a file (`multipart/form-data`); the operation reads it itself. */
+  form?: z.ZodType;
   /** Largest accepted body; 1 MiB when left out. */
   maxBodyBytes?: number;
 }

@@ -118,6 +118,7 @@ function register(registry: OpenAPIRegistry, definition: OperationDefinition): v
       ...(definition.body && {
         body: { required: true, content: { [definition.bodyMedia ?? "application/json"]: { schema: definition.body, ...(examples && { examples: examples.request }) } } },
       }),
+      ...(definition.form && { body: { required: true, content: { "multipart/form-data": { schema: definition.form } } } }),
     },
     responses: {
       [status]: {
