@@ -35,12 +35,16 @@ export const attachmentAnswer = z
 
 /** The text fields of the form; the file is the one part that is no text. */
 export const attachmentFormFields = z.strictObject({ caption: caption.optional() });
+const attachmentForm = attachmentFormFields
+  .extend({ file: z.string().meta({ format: "binary", description: "The file itself, with its name." }) })
+  .meta({ id: "AttachmentForm", description: "A file to be attached." });
 
 export const createAttachment = defineOperation({
   id: "createAttachment", method: "post", path: "/traverses/{id}/attachments", tag: TAG, scope: "records:write", status: 201,
   summary: "Attach a file to a draft",
   description: `Send a form (\`multipart/form-data\`) with the part \`file\`, and \`caption\` if you like (at most 500 characters). Taken are JPEG, PNG and PDF up to ${LARGEST_FILE / MIB} MiB, at most ${MOST_ATTACHMENTS} a traverse. What a file is, is told from its content, not from its name; one that is cut off, or has something after its end, is refused.`,
   params: ofTraverse,
+  form: attachmentForm,
   answer: attachmentAnswer,
   maxBodyBytes: LARGEST_FORM,
   problems: ["not-found", "not-a-draft", "invalid-request", "unsupported-media-type", "body-too-large"],
@@ -93,5 +97,6 @@ export const readAttachmentContent = defineOperation({
     signature: z.string().max(100).describe("HMAC of the attachment and the end."),
   }),
   answer: z.string(),
+  media: attachmentMediaType.options,
   problems: ["not-found", "link-not-valid", "temporarily-unavailable"],
 });
