@@ -17,16 +17,29 @@ interface Definition<Body extends z.ZodType, Params extends z.ZodType, Query ext
   status?: 200 | 201 | 204;
 }
 
-/** A change to records by a person in the portal: in the environment they see, in one transaction, under their name. */
-export function portalRecordOperation<Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType = z.ZodType>(
+interface PortalRecordCall<Body, Params, Query> extends RecordContext {
+  caller: Member;
+  input: Body;
+  params: Params;
+  query: Query;
+}
+
+/**
+ * A change to records by a person in the portal: in the environment they see, in one transaction, under their name.
+ * @param prepare What takes long and changes nothing: done before the transaction, so that it holds no connection and no lock.
+ */
+export function portalRecordOperation<Body extends z.ZodType, Params extends z.ZodType, Query extends z.ZodType = z.ZodType, Prepared = undefined>(
   definition: Definition<Body, Params, Query>,
-  run: (call: RecordContext & { caller: Member; input: z.output<Body>; params: z.output<Params>; query: z.output<Query> }) => Promise<unknown>,
+  run: (call: PortalRecordCall<z.output<Body>, z.output<Params>, z.output<Query>>, prepared: Prepared) => Promise<unknown>,
+  prepare?: (call: PortalRecordCall<z.output<Body>, z.output<Params>, z.output<Query>>) => Promise<Prepared>,
 ): Handler {
   return (request, context) => {
     const environment = environmentFrom(cookieOf(request, ENVIRONMENT_COOKIE));
     const handler = portalOperation(definition, async ({ caller, input, params, query }) => {
       const realm = { organisationId: caller.organisation.id, environment };
-      return { body: await inTransaction((db) => run({ db, realm, by: { userId: caller.userId }, caller, input, params, query })) };
+      const call = { db: database(), realm, by: { userId: caller.userId }, caller, input, params, query };
+      const prepared = (await prepare?.(call)) as Prepared;
+      return { body: await inTransaction((db) => run({ ...call, db }, prepared)) };
     });
     return handler(request, context);
   };

@@ -47,6 +47,28 @@ describe("imports in the portal", () => {
     await page.getByRole("heading", { name: /AHU-1/ }).waitFor();
   });
 
+  it("are taken as pasted rows too, and what was imported stays to be looked at", async () => {
+    await page.goto(at("/imports"));
+    const rows = TEMPLATE.toString("utf8").split("\r\n").slice(0, 2).join("\n").replace('"Supply main, north riser"', "Supply main").replace('"Outside air damper at minimum, supply fan at 52 Hz."', "").replaceAll(",", "\t");
+    await page.getByLabel("Or rows from a spreadsheet").fill(rows);
+    await page.getByLabel("Project").selectOption({ label: "Marram Point Library" });
+    await page.getByRole("button", { name: "Check the file" }).click();
+    await page.getByRole("button", { name: "Make 1 draft" }).click();
+    await page.getByText("1 draft made").waitFor();
+    await page.getByRole("link", { name: "Pasted rows" }).click();
+    await page.getByRole("heading", { name: "Pasted rows" }).waitFor();
+    expect(await page.getByRole("link", { name: "T1" }).getAttribute("href")).toMatch(/^\/records\/trv_/);
+    expect(await accessibilityFindings(page)).toEqual([]);
+    await page.goto(at("/imports/imp_01kbc000000000000000000000"));
+    await page.getByText("Page not found").first().waitFor();
+  });
+
+  it("offer the templates as the examples have them", async () => {
+    await page.goto(at("/imports"));
+    const [download] = await Promise.all([page.waitForEvent("download"), page.getByRole("link", { name: "one row a traverse" }).click()]);
+    expect(readFileSync(await download.path())).toEqual(TEMPLATE);
+  });
+
   it("axe finds nothing, nothing sticks out", async () => {
     await page.goto(at("/imports"));
     await choose("readings.csv", TEMPLATE);

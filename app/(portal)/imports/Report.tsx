@@ -52,7 +52,8 @@ function Faults({ faults }: Pick<ImportReport, "faults">) {
   );
 }
 
-function Traverses({ traverses }: Pick<ImportReport, "traverses">) {
+/** What each traverse comes to, with its draft once there is one. */
+export function Traverses({ traverses }: Pick<ImportReport, "traverses">) {
   return (
     <Table caption="Traverses in the file" maxHeight="28rem">
       <thead>

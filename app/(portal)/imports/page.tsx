@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import Link from "next/link";
 import { Table } from "@/app/_components/data/Table";
 import { formatNumber } from "@/app/_components/format/number";
 import { Time } from "@/app/_components/format/Time";
@@ -20,7 +21,9 @@ export default async function ImportsPage() {
   return (
     <>
       <PageHeader title="Imports">
-        Traverses from a CSV file, one row a traverse or one row a reading. The file is checked first; the drafts are made all together or not at all.
+        Traverses from a CSV file: <a href="/api/portal/imports/templates/row-per-traverse.csv" download className="link">one row a traverse</a> or{" "}
+        <a href="/api/portal/imports/templates/row-per-reading.csv" download className="link">one row a reading</a> (templates to fill in). The file is checked first; the drafts are made all together or not at all.
+        What each column takes is in the <Link href="/docs/reference" className="link">reference</Link>.
       </PageHeader>
       <div className="grid grid-cols-[minmax(0,1fr)] gap-8">
         {member.organisation.role === "viewer" ? (
@@ -44,7 +47,7 @@ export default async function ImportsPage() {
                 {items.map(({ id, name, rows, traverses, createdAt }) => (
                   <tr key={id}>
                     <td><Time value={createdAt} /></td>
-                    <th scope="row">{name ?? id}</th>
+                    <th scope="row"><Link href={`/imports/${id}`} className="link">{name ?? id}</Link></th>
                     <td className="numeric">{formatNumber(rows)}</td>
                     <td className="numeric">{formatNumber(traverses)}</td>
                   </tr>
