@@ -1,4 +1,3 @@
-import { readdirSync, readFileSync } from "node:fs";
 import type { ReadableStream as NodeReadableStream } from "node:stream/web";
 import { setTimeout } from "node:timers/promises";
 import { parse } from "csv-parse/sync";
@@ -6,6 +5,7 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { EXPORT_COLUMNS } from "@/api-spec/records/exports";
 import { newId } from "@/lib/ids/newId";
 import { testDatabase } from "../support/accounts";
+import { appMemory } from "../support/appMemory";
 import { arrange, issuedRecord, partner, SUPPLY_MAIN, type Partner } from "../support/records";
 
 const open = (by: Partner, query: string, signal?: AbortSignal): Promise<Response> =>
@@ -108,14 +108,6 @@ describe("an export", () => {
   });
 });
 
-/** What the application's process holds in memory, in MiB. */
-function memory(): number {
-  const statusOf = (pid: string): string => { try { return readFileSync(`/proc/${pid}/cmdline`, "utf8").includes("lib/launch/serve.ts") ? readFileSync(`/proc/${pid}/status`, "utf8") : ""; } catch { return ""; } };
-  // The application is a child of the process that started the tests, as this one is.
-  const ours = readdirSync("/proc").filter((name) => /^\d+$/.test(name)).map(statusOf).find((status) => status.includes(`PPid:\t${process.ppid}\n`));
-  return Number(/VmRSS:\s+(\d+)/.exec(ours!)![1]) / 1024;
-}
-
 describe("an export of 20,000 traverses", () => {
   const COUNT = 20_000;
   let by: Partner;
@@ -129,12 +121,12 @@ describe("an export of 20,000 traverses", () => {
 
   it.each(["csv", "ndjson"])("as %s is whole, and takes no more memory than a small one", async (format) => {
     const begin = performance.now();
-    const before = memory();
+    const before = appMemory();
     let [most, bytes, lines] = [0, 0, 0];
     for await (const chunk of (await open(by, `format=${format}`)).body as NodeReadableStream<Uint8Array>) {
       bytes += chunk.length;
       lines += Buffer.from(chunk).filter((byte) => byte === 10).length;
-      most = Math.max(most, memory());
+      most = Math.max(most, appMemory());
     }
     console.log(`${format}: ${(bytes / 1024 ** 2).toFixed(0)} MiB in ${((performance.now() - begin) / 1000).toFixed(1)} s; memory ${before.toFixed(0)} MiB before, ${most.toFixed(0)} at most`);
     expect(lines).toBe(COUNT + (format === "csv" ? 1 : 0));
@@ -143,11 +135,11 @@ describe("an export of 20,000 traverses", () => {
 
   it("waits for a reader who does not read", async () => {
     const abort = new AbortController();
-    const before = memory();
+    const before = appMemory();
     const reader = (await open(by, "format=ndjson", abort.signal)).body!.getReader();
     await reader.read();
     await setTimeout(3_000);
-    expect(memory() - before).toBeLessThan(60);
+    expect(appMemory() - before).toBeLessThan(60);
     abort.abort();
   });
 });

@@ -5,6 +5,8 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { LINE_COLUMN, READING_COLUMNS, REFERENCE_COLUMN, TRAVERSE_COLUMNS } from "@/api-spec/records/importColumns";
 import { importAnswer } from "@/api-spec/records/imports";
 import { testDatabase } from "../support/accounts";
+import { calculate } from "../support/api";
+import { appMemory } from "../support/appMemory";
 import { arrange, partner, type Partner } from "../support/records";
 
 const template = (name: string): Buffer => readFileSync(path.join(import.meta.dirname, "../../examples/csv", name));
@@ -325,6 +327,35 @@ describe("a file made to harm", () => {
     const { faults, faultCount } = await check(csv(Array.from({ length: 1_500 }, (_, index) => ({ ...ROUND, traverse: `B${index}`, diameter: "x" }))));
     expect([faults.length, faultCount]).toEqual([1_000, 1_500]);
   });
+});
+
+describe("a file of 5,000 traverses with 25 readings each", () => {
+  const [headings, first] = template("row-per-traverse.csv").toString().split("\r\n") as [string, string];
+  const file = [headings, ...Array.from({ length: 5_000 }, (_, index) => first.replace("T1", `N${index + 1}`))].join("\r\n");
+
+  it.each(["dry_run", "commit"])("%s: is done whole, and others are answered meanwhile", async (mode) => {
+    let [slowest, most, done] = [0, 0, false];
+    const before = appMemory();
+    const others = (async () => {
+      while (!done) {
+        const begin = performance.now();
+        await calculate("duct-area", app.key, { duct: { shape: "round", measured: "inside", diameter: { value: 14, unit: "in" } } }).expect(200);
+        slowest = Math.max(slowest, performance.now() - begin);
+        most = Math.max(most, appMemory());
+        await new Promise((resolve) => setTimeout(resolve, 50));
+      }
+    })();
+    const begin = performance.now();
+    const { body } = await send(file, { query: `mode=${mode}&projectId=${projectId}`, headers: { "Idempotency-Key": `five-thousand-${mode}` } }).expect(200);
+    const seconds = (performance.now() - begin) / 1_000;
+    done = true;
+    await others;
+    console.log(`${mode}: ${(file.length / 1024 ** 2).toFixed(1)} MiB in ${seconds.toFixed(1)} s; memory ${before.toFixed(0)} MiB before, ${most.toFixed(0)} at most; slowest other answer ${slowest.toFixed(0)} ms`);
+    expect([body.rows, body.faultCount, body.traverses.length]).toEqual([5_000, 0, 5_000]);
+    expect(new Set(body.traverses.map(({ id }: { id: string | null }) => id)).size).toBe(mode === "commit" ? 5_000 : 1);
+    expect(slowest).toBeLessThan(3_000);
+    expect(most - before).toBeLessThan(600);
+  }, 240_000);
 });
 
 describe("the columns", () => {
