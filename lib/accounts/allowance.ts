@@ -2,7 +2,7 @@ import { createHash } from "node:crypto";
 import ipaddr from "ipaddr.js";
 import { RateLimiterRes, type RateLimiterMySQL } from "rate-limiter-flexible";
 import { storedLimiter } from "@/lib/limits/storedLimiter";
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 import { callerAddress } from "@/lib/runtime/caller";
 import { processWide } from "@/lib/runtime/processWide";
 
@@ -70,6 +70,5 @@ async function trySpending(name: Allowance, whose: string[]): Promise<RateLimite
 function tooManyAttempts({ msBeforeNext }: RateLimiterRes): Problem {
   const seconds = Math.max(1, Math.ceil(msBeforeNext / 1_000));
   const minutes = Math.ceil(seconds / 60);
-  const detail = `There were too many attempts. Try again in ${minutes} ${minutes === 1 ? "minute" : "minutes"}.`;
-  return new Problem("too-many-attempts", { detail, errors: [{ pointer: "", code: "too_many_attempts", detail }], headers: { "Retry-After": String(seconds) } });
+  return refusal("too-many-attempts", `There were too many attempts. Try again in ${minutes} ${minutes === 1 ? "minute" : "minutes"}.`, {}, { "Retry-After": String(seconds) });
 }

@@ -2,19 +2,14 @@ import ipaddr from "ipaddr.js";
 import type { Scope } from "@/api-spec/define";
 import type { ProblemSlug } from "@/api-spec/problems";
 import { callerAddress } from "@/lib/runtime/caller";
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 import { keyDirectory, type Key } from "@/lib/keys/keyDirectory";
 import { parseKeyText, sameSecret } from "@/lib/keys/keyText";
 
 const CHALLENGE = 'Bearer realm="averduct"';
 
-function refuse(slug: ProblemSlug, detail: string, error?: "invalid_token" | "insufficient_scope"): Problem {
-  return new Problem(slug, {
-    detail,
-    errors: [{ pointer: "", header: "Authorization", code: slug.replaceAll("-", "_"), detail }],
-    headers: { "WWW-Authenticate": error ? `${CHALLENGE}, error="${error}"` : CHALLENGE },
-  });
-}
+const refuse = (slug: ProblemSlug, detail: string, error?: "invalid_token" | "insufficient_scope"): Problem =>
+  refusal(slug, detail, { header: "Authorization" }, { "WWW-Authenticate": error ? `${CHALLENGE}, error="${error}"` : CHALLENGE });
 
 /** The key a request carries, whatever it may be used for. Throws the problem that says what is wrong with it. */
 export async function identifyKey(request: Request): Promise<Key> {

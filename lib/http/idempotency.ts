@@ -1,7 +1,7 @@
 import { createHash } from "node:crypto";
 import type { Knex } from "knex";
 import { addRecord, recordsOf, type Realm } from "@/lib/records/realm";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { open, seal } from "@/lib/runtime/secretBox";
 
 const LONGEST = 200;
@@ -19,8 +19,7 @@ export function idempotencyKeyOf(request: Request): string | null {
   if (given === undefined) return null;
   const key = /^"(.*)"$/.exec(given)?.[1] ?? given;
   if (key.length > 0 && key.length <= LONGEST) return key;
-  const detail = `An Idempotency-Key has 1 to ${LONGEST} characters; a UUID does well.`;
-  throw new Problem("invalid-request", { detail, errors: [{ pointer: "", header: "Idempotency-Key", code: "idempotency_key_length", detail }] });
+  throw refusal("invalid-request", `An Idempotency-Key has 1 to ${LONGEST} characters; a UUID does well.`, { header: "Idempotency-Key", code: "idempotency_key_length" });
 }
 
 /** What makes two requests the same. */
@@ -40,8 +39,7 @@ export async function claimIdempotencyKey(db: Knex, realm: Realm, key: string, f
   const kept = await recordsOf<{ fingerprint: Buffer; status: number; headers: Record<string, string>; answer: string }>(db, "idempotency_keys", realm).where("idempotency_key", key).first();
   if (!kept) throw new Error("an idempotency key that was there is gone");
   if (kept.fingerprint.equals(fingerprint)) return { status: kept.status, headers: { ...kept.headers, "Idempotency-Replayed": "true" }, text: open(kept.answer) };
-  const detail = "This Idempotency-Key was used for another request within the last 24 hours.";
-  throw new Problem("idempotency-key-reused", { detail, errors: [{ pointer: "", header: "Idempotency-Key", code: "idempotency_key_reused", detail }] });
+  throw refusal("idempotency-key-reused", "This Idempotency-Key was used for another request within the last 24 hours.", { header: "Idempotency-Key" });
 }
 
 /** Keeps the answer with the work it belongs to, so that either both are there or neither. Sealed: an answer may hold a secret that is shown once. */

@@ -1,4 +1,4 @@
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 
 const SAFE_METHODS = new Set(["GET", "HEAD", "OPTIONS"]);
 
@@ -10,8 +10,7 @@ export function requireSameOrigin(request: Request): void {
   const host = request.headers.get("host");
   const fromOurPages = origin === null ? site === null || site === "same-origin" : hostOf(origin) === host && (site === null || site === "same-origin");
   if (fromOurPages) return;
-  const detail = "Changes are taken from the portal's own pages only.";
-  throw new Problem("forbidden-origin", { detail, errors: [{ pointer: "", header: "Origin", code: "forbidden_origin", detail }] });
+  throw refusal("forbidden-origin", "Changes are taken from the portal's own pages only.", { header: "Origin" });
 }
 
 function hostOf(origin: string): string | null {

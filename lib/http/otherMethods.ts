@@ -1,5 +1,5 @@
 import { newId } from "@/lib/ids/newId";
-import { Problem, problemResponse } from "@/lib/problems/problem";
+import { Problem, problemResponse, refusal } from "@/lib/problems/problem";
 
 
 export type Method = "GET" | "POST" | "PUT" | "PATCH" | "DELETE";
@@ -15,7 +15,7 @@ const answerWith = (problem: Problem): (() => Promise<Response>) => async () => 
 export function otherMethods(...taken: Method[]): Record<Method, () => Promise<Response>> {
   const detail = `This path takes ${taken.join(" and ")} only.`;
   const refuse = answerWith(
-    new Problem("method-not-allowed", { detail, errors: [{ pointer: "", code: "method_not_allowed", detail }], headers: { Allow: taken.join(", ") } }),
+    refusal("method-not-allowed", detail, {}, { Allow: taken.join(", ") }),
   );
   return { GET: refuse, POST: refuse, PUT: refuse, PATCH: refuse, DELETE: refuse };
 }

@@ -1,8 +1,7 @@
 import type { z } from "zod";
 import { findSignedIn, SESSION_COOKIE, type Role, type SignedIn } from "@/lib/accounts/session";
 import { newId } from "@/lib/ids/newId";
-import { Problem, problemResponse } from "@/lib/problems/problem";
-import type { ProblemSlug } from "@/api-spec/problems";
+import { problemResponse, refusal } from "@/lib/problems/problem";
 import { cookieOf } from "./cookies";
 import type { Handler } from "./operation";
 import { requireSameOrigin } from "./origin";
@@ -101,5 +100,3 @@ async function callerFor(access: Access, request: Request): Promise<SignedIn | n
   }
   return caller;
 }
-
-const refusal = (slug: ProblemSlug, detail: string): Problem => new Problem(slug, { detail, errors: [{ pointer: "", code: slug.replaceAll("-", "_"), detail }] });

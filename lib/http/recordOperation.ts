@@ -3,7 +3,7 @@ import type { z } from "zod";
 import { database } from "@/db/connection";
 import type { OperationDefinition } from "@/api-spec/define";
 import type { RecordContext } from "@/lib/records/context";
-import { Problem, problemResponse } from "@/lib/problems/problem";
+import { problemResponse, refusal } from "@/lib/problems/problem";
 import { claimIdempotencyKey, fingerprintOf, idempotencyKeyOf, keepAnswer, type KeptAnswer } from "./idempotency";
 import { readCall, type Call, type Handler } from "./operation";
 import { admit, beginPassage, endPassage, toProblem, withHeaders } from "./passage";
@@ -104,8 +104,7 @@ function matcher(request: Request): (version: number) => void {
   return (version) => {
     if (given === null || given.trim() === "*") return;
     if (given.split(",").some((tag) => tag.trim() === etagOf(version))) return;
-    const detail = `If-Match is ${given}; the record is now at ${etagOf(version)}.`;
-    throw new Problem("precondition-failed", { detail, errors: [{ pointer: "", header: "If-Match", code: "precondition_failed", detail }], headers: { ETag: etagOf(version) } });
+    throw refusal("precondition-failed", `If-Match is ${given}; the record is now at ${etagOf(version)}.`, { header: "If-Match" }, { ETag: etagOf(version) });
   };
 }
 

@@ -1,4 +1,4 @@
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 
 const MIB = 1024 ** 2;
 export const DEFAULT_BODY_LIMIT = MIB;
@@ -21,20 +21,14 @@ export async function readJson(request: Request, maxBytes = DEFAULT_BODY_LIMIT):
   try {
     return JSON.parse(text);
   } catch (error) {
-    const detail = `The body is not JSON: ${error instanceof Error ? error.message : "it could not be parsed"}.`;
-    throw new Problem("malformed-json", { detail, errors: [{ pointer: "", code: "malformed_json", detail }] });
+    throw refusal("malformed-json", `The body is not JSON: ${error instanceof Error ? error.message : "it could not be parsed"}.`);
   }
 }
 
 function requireType(contentType: string | null, taken: string): void {
   const type = contentType?.split(";")[0]?.trim().toLowerCase();
   if (type === taken) return;
-  const detail = contentType ? `The body was sent as ${type}; send it as ${taken}.` : `The request has no Content-Type; send ${taken}.`;
-  throw new Problem("unsupported-media-type", {
-    detail,
-    errors: [{ pointer: "", header: "Content-Type", code: "unsupported_media_type", detail }],
-    headers: { Accept: taken },
-  });
+  throw refusal("unsupported-media-type", contentType ? `The body was sent as ${type}; send it as ${taken}.` : `The request has no Content-Type; send ${taken}.`, { header: "Content-Type" }, { Accept: taken });
 }
 
 /** The text of a file, in the encoding that its byte order mark or the content type says; UTF-8 where neither does. */
@@ -46,8 +40,7 @@ async function readFileText(request: Request, media: string, maxBytes = DEFAULT_
   try {
     return new TextDecoder(charset, { fatal: true }).decode(bytes);
   } catch {
-    const detail = `The file cannot be read as ${charset}. Save it as CSV in UTF-8, or say which encoding it is in: Content-Type: ${media}; charset=windows-1252.`;
-    throw new Problem("invalid-request", { detail, errors: [{ pointer: "", code: "encoding_not_readable", detail }] });
+    throw refusal("invalid-request", `The file cannot be read as ${charset}. Save it as CSV in UTF-8, or say which encoding it is in: Content-Type: ${media}; charset=windows-1252.`, { code: "encoding_not_readable" });
   }
 }
 
@@ -70,8 +63,7 @@ async function unlessCutOff<Content>(request: Request, read: () => Promise<Conte
     return await read();
   } catch (error) {
     if (!request.signal.aborted) throw error;
-    const detail = "The connection was closed before the whole body had come.";
-    throw new Problem("malformed-json", { detail, errors: [{ pointer: "", code: "body_incomplete", detail }] });
+    throw refusal("malformed-json", "The connection was closed before the whole body had come.", { code: "body_incomplete" });
   }
 }
 
@@ -92,6 +84,5 @@ async function readUpTo(request: Request, maxBytes: number): Promise<Buffer> {
 }
 
 function tooLarge(maxBytes: number): Problem {
-  const detail = `The body is larger than the ${maxBytes / MIB} MiB that this operation takes.`;
-  return new Problem("body-too-large", { detail, errors: [{ pointer: "", code: "body_too_large", detail }] });
+  return refusal("body-too-large", `The body is larger than the ${maxBytes / MIB} MiB that this operation takes.`);
 }

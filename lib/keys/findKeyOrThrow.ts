@@ -1,10 +1,9 @@
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { findKeySummary, type KeySummary } from "./listKeys";
 
 /** A key of an organisation. Throws `not-found` for one it does not have, whoever else may have it. */
 export async function findKeyOrThrow(organisationId: string, id: string): Promise<KeySummary> {
   const key = await findKeySummary(organisationId, id);
   if (key) return key;
-  const detail = "Your organisation has no key with this id.";
-  throw new Problem("not-found", { detail, errors: [{ pointer: "", parameter: "id", code: "not_found", detail }] });
+  throw refusal("not-found", "Your organisation has no key with this id.", { parameter: "id" });
 }

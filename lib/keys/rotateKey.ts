@@ -1,6 +1,6 @@
 import { database } from "@/db/connection";
 import { recordAudit } from "@/lib/accounts/audit";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { createKey } from "./createKey";
 import { findKeyOrThrow } from "./findKeyOrThrow";
 
@@ -13,8 +13,7 @@ const HOUR_MS = 3_600_000;
 export async function rotateKey(organisationId: string, id: string, overlapHours: number, by: string): Promise<{ id: string; text: string }> {
   const old = await findKeyOrThrow(organisationId, id);
   if (old.status !== "active" || old.replacedBy) {
-    const detail = old.replacedBy ? "This key has a successor already; rotate that one." : `This key is ${old.status}; make a new one instead.`;
-    throw new Problem("invalid-request", { detail, errors: [{ pointer: "", code: "key_not_active", detail }] });
+    throw refusal("invalid-request", old.replacedBy ? "This key has a successor already; rotate that one." : `This key is ${old.status}; make a new one instead.`, { code: "key_not_active" });
   }
   const endsAt = new Date(Date.now() + overlapHours * HOUR_MS);
   return database().transaction(async (db) => {

@@ -1,5 +1,5 @@
 import { RateLimiterMemory, RateLimiterRes } from "rate-limiter-flexible";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { callerAddress } from "@/lib/runtime/caller";
 import { processWide } from "@/lib/runtime/processWide";
 
@@ -12,11 +12,6 @@ export async function spendGuestRequest(): Promise<void> {
     await guests().consume(callerAddress() ?? "unknown");
   } catch (error) {
     if (!(error instanceof RateLimiterRes)) throw error;
-    const detail = `Without a key this takes ${REQUESTS_PER_MINUTE} calculations a minute. Create an account for a key of your own.`;
-    throw new Problem("burst-limit-reached", {
-      detail,
-      errors: [{ pointer: "", code: "burst_limit_reached", detail }],
-      headers: { "Retry-After": String(Math.max(1, Math.ceil(error.msBeforeNext / 1_000))) },
-    });
+    throw refusal("burst-limit-reached", `Without a key this takes ${REQUESTS_PER_MINUTE} calculations a minute. Create an account for a key of your own.`, {}, { "Retry-After": String(Math.max(1, Math.ceil(error.msBeforeNext / 1_000))) });
   }
 }

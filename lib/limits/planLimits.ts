@@ -1,4 +1,4 @@
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 import type { Key } from "@/lib/keys/keyDirectory";
 import { inBackground } from "@/lib/runtime/background";
 import { processWide } from "@/lib/runtime/processWide";
@@ -59,11 +59,7 @@ export async function spendItems(key: Key, items: number, now: number): Promise<
 
 function overLimit(slug: "burst-limit-reached" | "quota-reached", detail: string, allowances: PlanAllowances, now: number): Problem {
   const { endsAt } = slug === "quota-reached" ? allowances.quota! : allowances.burst!;
-  return new Problem(slug, {
-    detail,
-    errors: [{ pointer: "", code: slug.replaceAll("-", "_"), detail }],
-    headers: { "Retry-After": String(secondsUntil(endsAt, now)), ...limitHeaders(allowances, now) },
-  });
+  return refusal(slug, detail, {}, { "Retry-After": String(secondsUntil(endsAt, now)), ...limitHeaders(allowances, now) });
 }
 
 const secondsUntil = (moment: number, now: number): number => Math.max(1, Math.ceil((moment - now) / SECOND_MS));

@@ -28,6 +28,13 @@ export class Problem extends Error {
   }
 }
 
+/**
+ * The problem of a request as a whole.
+ * @param at The place at fault, where there is one, and the fault's code, where it is not that of the problem.
+ */
+export const refusal = (slug: ProblemSlug, detail: string, at: Partial<Omit<ProblemFault, "detail">> = {}, headers?: Record<string, string>): Problem =>
+  new Problem(slug, { detail, errors: [{ pointer: "", code: slug.replaceAll("-", "_"), ...at, detail }], ...(headers && { headers }) });
+
 /** A JSON Pointer (RFC 6901) from a path. */
 export const pointerTo = (path: readonly PropertyKey[]): string =>
   path.map((part) => `/${String(part).replaceAll("~", "~0").replaceAll("/", "~1")}`).join("");

@@ -1,5 +1,5 @@
 import { certificate } from "@/lib/certificate/certificate";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { verifyUrl } from "./traverses/signature";
 import { verifyRecord } from "./verifyRecord";
 
@@ -9,10 +9,8 @@ import { verifyRecord } from "./verifyRecord";
  */
 export async function certificateOf(id: string): Promise<Buffer> {
   const record = await verifyRecord(id);
-  if (!record) throw refusal("not-issued", "not_issued", "Only what was issued has a certificate.");
+  if (!record) throw refusal("not-issued", "Only what was issued has a certificate.");
   const { document, state, status, supersededBy, voided, keyId } = record;
-  if (!document || !state.valid || status === "draft") throw refusal("record-altered", "record_altered", "The stored record is not what was signed, so it gets no certificate.");
+  if (!document || !state.valid || status === "draft") throw refusal("record-altered", "The stored record is not what was signed, so it gets no certificate.");
   return certificate(document, { verifyUrl: verifyUrl(id), status, supersededBy, voidReason: voided?.reason ?? null, signingKeyId: keyId });
 }
-
-const refusal = (slug: "not-issued" | "record-altered", code: string, detail: string): Problem => new Problem(slug, { detail, errors: [{ pointer: "", code, detail }] });

@@ -1,7 +1,7 @@
 import type { z } from "zod";
 import type { instrumentAnswer, instrumentChange, instrumentFields, instrumentsQuery } from "@/api-spec/records/instruments";
 import { newId } from "@/lib/ids/newId";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import type { RecordContext } from "./context";
 import { noSuchRecord } from "./noSuchRecord";
 import { containing, pageOf, type Page } from "./page";
@@ -90,8 +90,7 @@ export async function deleteInstrument(context: RecordContext, id: string, requi
   requireMatch(row.version);
   const used = await recordsOf<{ id: string }>(context.db, "traverses", context.realm).where("instrument_id", id).first("traverses.id");
   if (used) {
-    const detail = "Traverses were taken with this instrument.";
-    throw new Problem("still-in-use", { detail, errors: [{ pointer: "", code: "instrument_in_use", detail }] });
+    throw refusal("still-in-use", "Traverses were taken with this instrument.", { code: "instrument_in_use" });
   }
   await instruments(context).where("instruments.id", id).delete();
 }

@@ -1,5 +1,5 @@
 import type { Knex } from "knex";
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 
 /** A page of a list, and where the next one begins. */
 export interface Page<Item> {
@@ -58,8 +58,7 @@ function cursorFrom(text: string): [string, string] {
 }
 
 function notACursor(): Problem {
-  const detail = "This is not the `next` of a page of this list.";
-  return new Problem("invalid-request", { detail, errors: [{ pointer: "", parameter: "after", code: "cursor_not_valid", detail }] });
+  return refusal("invalid-request", "This is not the `next` of a page of this list.", { parameter: "after", code: "cursor_not_valid" });
 }
 
 /** Text as it may stand in a LIKE pattern. */

@@ -1,7 +1,7 @@
 import type { z } from "zod";
 import type { projectAnswer, projectChange, projectFields, projectsQuery } from "@/api-spec/records/projects";
 import { newId } from "@/lib/ids/newId";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import type { RecordContext } from "./context";
 import { noSuchRecord } from "./noSuchRecord";
 import { containing, pageOf, type Page } from "./page";
@@ -62,8 +62,7 @@ export async function deleteProject(context: RecordContext, id: string, requireM
   requireMatch(row.version);
   const held = await recordsOf<{ id: string }>(context.db, "traverses", context.realm).where("project_id", id).first("traverses.id");
   if (held) {
-    const detail = "The project holds traverses.";
-    throw new Problem("still-in-use", { detail, errors: [{ pointer: "", code: "project_holds_traverses", detail }] });
+    throw refusal("still-in-use", "The project holds traverses.", { code: "project_holds_traverses" });
   }
   await projects(context).where("projects.id", id).delete();
 }

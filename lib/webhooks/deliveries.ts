@@ -1,6 +1,6 @@
 import type { z } from "zod";
 import type { deliveryAnswer } from "@/api-spec/records/webhookEndpoints";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import type { RecordContext } from "@/lib/records/context";
 import { noSuchRecord } from "@/lib/records/noSuchRecord";
 import { pageOf, type Page, type PageRequest } from "@/lib/records/page";
@@ -61,8 +61,7 @@ export async function redeliver(context: RecordContext, endpointId: string, id: 
   const endpoint = await findEndpoint(context, endpointId, true);
   const { event_id: eventId } = await findDelivery(context, endpointId, id);
   if (endpoint.disabled_at !== null) {
-    const detail = `The endpoint is disabled: ${endpoint.disabled_reason}`;
-    throw new Problem("endpoint-disabled", { detail, errors: [{ pointer: "", code: "endpoint_disabled", detail }] });
+    throw refusal("endpoint-disabled", `The endpoint is disabled: ${endpoint.disabled_reason}`);
   }
   await recordsOf(context.db, "deliveries", context.realm).where({ webhook_endpoint_id: endpointId, event_id: eventId, status: "pending" }).update({ status: "failed", next_attempt_at: null } as never);
   const added = await addDelivery(context.db, context.realm, eventId, endpointId);

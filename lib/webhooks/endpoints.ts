@@ -3,7 +3,7 @@ import type { z } from "zod";
 import type { webhookEndpointAnswer, webhookEndpointChange, webhookEndpointFields } from "@/api-spec/records/webhookEndpoints";
 import type { EventType } from "@/api-spec/records/events";
 import { newId } from "@/lib/ids/newId";
-import { Problem } from "@/lib/problems/problem";
+import { Problem, refusal } from "@/lib/problems/problem";
 import type { RecordContext } from "@/lib/records/context";
 import { noSuchRecord } from "@/lib/records/noSuchRecord";
 import { pageOf, type Page, type PageRequest } from "@/lib/records/page";
@@ -118,6 +118,5 @@ async function refuseTooMany(context: RecordContext): Promise<void> {
   await context.db("organisations").where("id", context.realm.organisationId).forUpdate().first("id");
   const rows = await endpoints(context).select("webhook_endpoints.id");
   if (rows.length < MOST_ENDPOINTS) return;
-  const detail = `There are ${rows.length} webhook endpoints in this environment already.`;
-  throw new Problem("too-many-endpoints", { detail, errors: [{ pointer: "", code: "too_many_endpoints", detail }] });
+  throw refusal("too-many-endpoints", `There are ${rows.length} webhook endpoints in this environment already.`);
 }

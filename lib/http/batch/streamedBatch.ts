@@ -2,7 +2,7 @@ import type { ReadableStream as NodeReadableStream } from "node:stream/web";
 import { setImmediate } from "node:timers/promises";
 import { MOST_BATCH_LINES, batch } from "@/api-spec/calculations/batch";
 import { spendItems } from "@/lib/limits/planLimits";
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 import { DEFAULT_BODY_LIMIT } from "../requestBody";
 import { endPassage, withHeaders, type Passage } from "../passage";
 import { linesOf, type Line } from "./lines";
@@ -69,17 +69,15 @@ async function runLines(lines: Line[], from: number, passage: Passage): Promise<
 }
 
 function runLine(line: Line, index: number, requestId: string): ItemResult {
-  if ("tooLong" in line) return failedItem(lineFault("body-too-large", "line_too_long", "The line is longer than 1 MiB."), index, requestId, "");
+  if ("tooLong" in line) return failedItem(refusal("body-too-large", "The line is longer than 1 MiB.", { code: "line_too_long" }), index, requestId, "");
   let item: unknown;
   try {
     item = JSON.parse(line.text);
   } catch (error) {
     const detail = `The line is not JSON: ${error instanceof Error ? error.message : "it could not be parsed"}.`;
-    return failedItem(lineFault("malformed-json", "malformed_json", detail), index, requestId, "");
+    return failedItem(refusal("malformed-json", detail), index, requestId, "");
   }
   return runItem(item, index, requestId, "");
 }
 
-const tooManyLines = (): Problem => lineFault("body-too-large", "too_many_lines", `A batch takes at most ${MOST_BATCH_LINES} lines; the rest was not read.`);
-
-const lineFault = (slug: "body-too-large" | "malformed-json", code: string, detail: string): Problem => new Problem(slug, { detail, errors: [{ pointer: "", code, detail }] });
+const tooManyLines = (): Problem => refusal("body-too-large", `A batch takes at most ${MOST_BATCH_LINES} lines; the rest was not read.`, { code: "too_many_lines" });

@@ -1,7 +1,7 @@
 import { createHash } from "node:crypto";
 import { MOST_ATTACHMENTS, type AttachmentMediaType } from "@/api-spec/records/attachments";
 import { newId } from "@/lib/ids/newId";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { objectStore } from "@/lib/storage/objectStore";
 import type { RecordContext } from "../context";
 import { addHistory } from "../history";
@@ -53,6 +53,5 @@ export async function addAttachment(context: RecordContext, traverseId: string, 
 async function requireRoom(context: RecordContext, traverseId: string): Promise<void> {
   const held = await attachmentsOf(context, traverseId).select("attachments.id");
   if (held.length < MOST_ATTACHMENTS) return;
-  const detail = `The traverse has ${held.length} attachments, as many as it can have.`;
-  throw new Problem("invalid-request", { detail, errors: [{ pointer: "", code: "too_many_attachments", detail }] });
+  throw refusal("invalid-request", `The traverse has ${held.length} attachments, as many as it can have.`, { code: "too_many_attachments" });
 }

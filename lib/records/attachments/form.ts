@@ -1,6 +1,6 @@
 import { Busboy, type BusboyFileStream, type BusboyInstance } from "@fastify/busboy";
 import { LARGEST_FILE } from "@/api-spec/records/attachments";
-import { Problem, pointerTo, type ProblemFault } from "@/lib/problems/problem";
+import { Problem, pointerTo, type ProblemFault, refusal } from "@/lib/problems/problem";
 
 const MIB = 1024 ** 2;
 const FILE = "file";
@@ -89,7 +89,7 @@ function parserFor(contentType: string): BusboyInstance {
   }
 }
 
-const notAForm = (detail: string): Problem => new Problem("invalid-request", { detail, errors: [{ pointer: "", code: "form_malformed", detail }] });
+const notAForm = (detail: string): Problem => refusal("invalid-request", detail, { code: "form_malformed" });
 
 function fileTooLarge(): Problem {
   const detail = `The file is larger than the ${LARGEST_FILE / MIB} MiB that an attachment can have.`;

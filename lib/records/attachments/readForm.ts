@@ -1,5 +1,5 @@
 import { LARGEST_FORM } from "@/api-spec/records/attachments";
-import { Problem } from "@/lib/problems/problem";
+import { type Problem, refusal } from "@/lib/problems/problem";
 import { AttachmentFormReader, type FormContent } from "./form";
 
 const MIB = 1024 ** 2;
@@ -17,8 +17,7 @@ export async function readForm(request: Request): Promise<FormContent> {
     await feed(request, form);
   } catch (error) {
     if (!request.signal.aborted) throw error;
-    const detail = "The connection was closed before the whole form had come.";
-    throw new Problem("invalid-request", { detail, errors: [{ pointer: "", code: "body_incomplete", detail }] });
+    throw refusal("invalid-request", "The connection was closed before the whole form had come.", { code: "body_incomplete" });
   }
   return form.end();
 }
@@ -36,11 +35,9 @@ async function feed(request: Request, form: AttachmentFormReader): Promise<void>
 }
 
 function wrongType(contentType: string): Problem {
-  const detail = contentType ? `The body was sent as ${contentType.split(";")[0]}; send a form as ${FORM}.` : `The request has no Content-Type; send a form as ${FORM}.`;
-  return new Problem("unsupported-media-type", { detail, errors: [{ pointer: "", header: "Content-Type", code: "unsupported_media_type", detail }], headers: { Accept: FORM } });
+  return refusal("unsupported-media-type", contentType ? `The body was sent as ${contentType.split(";")[0]}; send a form as ${FORM}.` : `The request has no Content-Type; send a form as ${FORM}.`, { header: "Content-Type" }, { Accept: FORM });
 }
 
 function tooLarge(): Problem {
-  const detail = `The form is larger than the ${Math.floor(LARGEST_FORM / MIB)} MiB that this operation takes.`;
-  return new Problem("body-too-large", { detail, errors: [{ pointer: "", code: "body_too_large", detail }] });
+  return refusal("body-too-large", `The form is larger than the ${Math.floor(LARGEST_FORM / MIB)} MiB that this operation takes.`);
 }

@@ -1,7 +1,7 @@
 import { planFigure } from "@/lib/airflow/figure/planFigure";
 import { resultFigure } from "@/lib/airflow/figure/resultFigure";
 import { thumbnail } from "@/lib/airflow/figure/thumbnail";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import { measurementOf } from "./measure";
 import type { TraverseRow } from "./row";
 
@@ -15,8 +15,7 @@ export function figureOf(row: TraverseRow, size: "page" | "thumbnail" = "page", 
   }
   const { duct, layout, points, enterFrom, probe, site, units } = input;
   if (duct && layout && size === "page") return planFigure({ duct, layout, points, enterFrom, probe, site, units, title: titleOf(row), width });
-  const detail = "The traverse has neither readings nor a layout to draw in its duct.";
-  throw new Problem("nothing-to-draw", { detail, errors: [{ pointer: "", code: "nothing_to_draw", detail }] });
+  throw refusal("nothing-to-draw", "The traverse has neither readings nor a layout to draw in its duct.");
 }
 
 const titleOf = ({ system, input: { location } }: TraverseRow): string => [system, location].filter(Boolean).join(", ") || "Traverse";

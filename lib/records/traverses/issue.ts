@@ -1,4 +1,4 @@
-import { Problem } from "@/lib/problems/problem";
+import { Problem, refusal } from "@/lib/problems/problem";
 import { newId } from "@/lib/ids/newId";
 import { canonicalJson } from "@/lib/signing/canonicalJson";
 import { signDetached } from "@/lib/signing/detachedJws";
@@ -69,8 +69,7 @@ export async function reviseTraverse(context: RecordContext, id: string, require
   requireMatch(row.version);
   const draft = await traverses(context).where("supersedes_id", id).where("traverses.status", "draft").first("traverses.id");
   if (draft) {
-    const detail = `The draft ${draft.id} is to supersede this record.`;
-    throw new Problem("revision-open", { detail, errors: [{ pointer: "", code: "revision_open", detail }] });
+    throw refusal("revision-open", `The draft ${draft.id} is to supersede this record.`);
   }
   const revisionId = newId("trv");
   const now = new Date();

@@ -4,7 +4,7 @@ import type { AirflowAnswer } from "@/lib/airflow/calculations/airflow";
 import type { RecordContext } from "../context";
 import { noSuchRecord } from "../noSuchRecord";
 import { recordsOf } from "../realm";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import type { DatedInstrument } from "./datedInstrument";
 
 /** What was sent of a traverse, without what was left out or cleared. */
@@ -52,14 +52,12 @@ export async function findTraverse(context: Reading, id: string, lock = false): 
 export async function findDraft(context: Reading, id: string): Promise<TraverseRow> {
   const row = await findTraverse(context, id, true);
   if (row.status === "draft") return row;
-  const detail = `The traverse is ${row.status === "void" ? "void" : row.status}; only a draft can be changed.`;
-  throw new Problem("not-a-draft", { detail, errors: [{ pointer: "", code: "not_a_draft", detail }] });
+  throw refusal("not-a-draft", `The traverse is ${row.status === "void" ? "void" : row.status}; only a draft can be changed.`);
 }
 
 /** The row of an issued record, locked. Throws the problem where it is in another state. */
 export async function findIssued(context: Reading, id: string): Promise<TraverseRow> {
   const row = await findTraverse(context, id, true);
   if (row.status === "issued") return row;
-  const detail = row.status === "draft" ? "The traverse is a draft." : `The traverse is ${row.status}${row.superseded_by_id ? ` by ${row.superseded_by_id}` : ""}.`;
-  throw new Problem("not-issued", { detail, errors: [{ pointer: "", code: "not_issued", detail }] });
+  throw refusal("not-issued", row.status === "draft" ? "The traverse is a draft." : `The traverse is ${row.status}${row.superseded_by_id ? ` by ${row.superseded_by_id}` : ""}.`);
 }

@@ -1,5 +1,5 @@
 import { config } from "@/lib/runtime/config";
-import { Problem } from "@/lib/problems/problem";
+import { refusal } from "@/lib/problems/problem";
 import type { RecordContext } from "../context";
 import { findTraverse } from "./row";
 
@@ -8,8 +8,7 @@ export async function signatureOf({ db, realm }: Pick<RecordContext, "db" | "rea
   await findTraverse({ db, realm }, id);
   const row = await db<{ document: string; signature: string; signing_key_id: string; traverse_id: string }>("issued_documents").where("traverse_id", id).first();
   if (!row) {
-    const detail = "The traverse is a draft; only what was issued is signed.";
-    throw new Problem("not-issued", { detail, errors: [{ pointer: "", code: "not_issued", detail }] });
+    throw refusal("not-issued", "The traverse is a draft; only what was issued is signed.");
   }
   const base = config().AVERDUCT_URL;
   return { jws: row.signature, document: row.document, keyId: row.signing_key_id, jwks: `${base}/.well-known/jwks.json`, verify: verifyUrl(id) };
